@@ -34,7 +34,10 @@ export const condition = z.strictObject({
   orientation: z.enum(['horizontal', 'vertical']),
   air,
   /** Fixed total film coefficient per face; replaces convection and radiation on the board and on case tops. */
-  filmWPerM2K: z.union([film, z.strictObject({ top: film, bottom: film })]).nullable().default(null),
+  filmWPerM2K: z
+    .union([film, z.strictObject({ top: film, bottom: film })])
+    .nullable()
+    .default(null),
   /** Voltage by supply; a supply not named stands at its maximum. */
   supplies: z.record(name, voltage).default({}),
   /** Output current by regulator. */

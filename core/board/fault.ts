@@ -31,6 +31,8 @@ function message(issue: z.core.$ZodIssue): string {
       ? `must be one of ${issue.values.map((value) => shown(value)).join(', ')}, found ${shown(issue.input)}`
       : issue.message;
   if (issue.code === 'invalid_type' && issue.message.startsWith('Invalid'))
-    return issue.input === undefined ? `is missing (${issue.expected})` : `must be ${issue.expected}, found ${shown(issue.input)}`;
+    return issue.input === undefined
+      ? `is missing (${issue.expected})`
+      : `must be ${issue.expected}, found ${shown(issue.input)}`;
   return issue.message;
 }

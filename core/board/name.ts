@@ -6,7 +6,9 @@ function text(maximum: number, minimum = 1) {
     .string({ error: `must be text of ${minimum} to ${maximum} characters` })
     .min(minimum, { error: `must be text of ${minimum} to ${maximum} characters` })
     .max(maximum, { error: `must be text of ${minimum} to ${maximum} characters` })
-    .refine((value) => !/\p{Cc}|\p{Cs}/u.test(value), { error: 'must not hold control characters or broken characters' });
+    .refine((value) => !/\p{Cc}|\p{Cs}/u.test(value), {
+      error: 'must not hold control characters or broken characters',
+    });
 }
 
 /** Reference designator or object id: U1, p1, screw1. */

@@ -6,7 +6,11 @@ const current = quantity('A', 0, 200);
 const voltage = quantity('V', 0, 2000);
 
 /** Output current → value, straight between the points, constant beyond the last; currents rising. */
-const currentTable = (value: typeof current) => z.array(z.tuple([current, value])).min(1).max(100);
+const currentTable = (value: typeof current) =>
+  z
+    .array(z.tuple([current, value]))
+    .min(1)
+    .max(100);
 
 export const currentLimit = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('constant'), limitA: current }),

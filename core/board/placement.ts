@@ -9,10 +9,9 @@ const length = quantity('mm', 0.05, 200);
 export const power = quantity('W', 0, 500);
 
 /** What a regulator is fed from: a supply, or another regulator's output. */
-export const feed = z.union(
-  [z.strictObject({ supply: name }), z.strictObject({ regulator: objectId })],
-  { error: 'must be { "supply": name } or { "regulator": ref }' },
-);
+export const feed = z.union([z.strictObject({ supply: name }), z.strictObject({ regulator: objectId })], {
+  error: 'must be { "supply": name } or { "regulator": ref }',
+});
 
 /** Series resistor and/or diode between feed and regulator; `source` names the heat source on the board that it heats. */
 export const dropper = z
