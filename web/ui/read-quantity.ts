@@ -1,0 +1,48 @@
+import { convertTyped } from './typed-units.ts';
+
+export type ReadQuantity = { value: number } | { error: string };
+
+const pattern = /^([+-]?(?:\d[\d.,]*|[.,]\d+)(?:e[+-]?\d{1,3})?)(.*)$/i;
+
+/**
+ * Reads what a person typed into a number field: decimal point or comma, spaces between thousands, a true minus,
+ * and a unit of the same kind as the field's ("35um", "1,4 mil", "130 mA").
+ */
+export function readQuantity(text: string, unit: string): ReadQuantity {
+  const trimmed = text
+    .trim()
+    .replace(/[\u2212\u2013]/g, '-')
+    .replace(/(?<=\d)[\s\u00a0\u2009\u202f'’](?=\d)/g, '')
+    .replace(/^([+-])\s+/, '$1');
+  const match = pattern.exec(trimmed);
+  if (!match) return { error: `“${text.trim()}” is not a number.` };
+  const figures = match[1] ?? '';
+  const ambiguous = ambiguousThousands(figures);
+  if (ambiguous) return { error: ambiguous };
+  const value = Number(plainFigures(figures));
+  if (!Number.isFinite(value)) return { error: `“${figures}” is not a number that can be stored.` };
+  const typedUnit = (match[2] ?? '').trim();
+  const converted = convertTyped(value, typedUnit, unit);
+  if (converted === null) {
+    return { error: `“${typedUnit}” is not a unit for this field${unit ? `, which is in ${unit}` : ''}.` };
+  }
+  return { value: converted };
+}
+
+/** "1,000" is one to some and a thousand to others; asking beats guessing. "0,125" and "1,5" are clear. */
+function ambiguousThousands(figures: string): string | null {
+  const match = /^[+-]?([1-9]\d{0,2}),(\d{3})$/.exec(figures);
+  if (!match) return null;
+  return `“${figures}” can be read in two ways. Write ${match[1]}.${match[2]} or ${match[1]}${match[2]}.`;
+}
+
+/** The last of point and comma is the decimal sign if it stands once; what comes before it parts thousands. */
+function plainFigures(figures: string): string {
+  const last = Math.max(figures.lastIndexOf(','), figures.lastIndexOf('.'));
+  if (last < 0) return figures;
+  const sign = figures[last] ?? '.';
+  const once = figures.indexOf(sign) === last;
+  const whole = figures.slice(0, last).replace(/[.,]/g, '');
+  const rest = figures.slice(last + 1);
+  return once ? `${whole}.${rest}` : whole + rest;
+}

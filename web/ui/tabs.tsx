@@ -1,0 +1,33 @@
+import { Tabs as Radix } from 'radix-ui';
+import type { ReactNode } from 'react';
+
+type Props = {
+  /** Name of the row of tabs for those who cannot see it. */
+  label: string;
+  value: string;
+  onChange: (value: string) => void;
+  tabs: readonly { value: string; label: ReactNode; content: ReactNode }[];
+};
+
+/** Look of a tab, shared with rows of links that look alike. */
+export const tabClass =
+  '-mb-px inline-flex min-h-10 items-center gap-2 border-b-2 border-transparent px-1 font-semibold whitespace-nowrap text-ink-soft hover:text-ink data-[state=active]:border-copper data-[state=active]:text-ink aria-[current=page]:border-copper aria-[current=page]:text-ink';
+
+export function Tabs({ label, value, onChange, tabs }: Props) {
+  return (
+    <Radix.Root value={value} onValueChange={onChange}>
+      <Radix.List aria-label={label} className="flex gap-6 overflow-x-auto border-b border-line">
+        {tabs.map((tab) => (
+          <Radix.Trigger key={tab.value} value={tab.value} className={tabClass}>
+            {tab.label}
+          </Radix.Trigger>
+        ))}
+      </Radix.List>
+      {tabs.map((tab) => (
+        <Radix.Content key={tab.value} value={tab.value} className="pt-6">
+          {tab.content}
+        </Radix.Content>
+      ))}
+    </Radix.Root>
+  );
+}
