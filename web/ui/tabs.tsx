@@ -1,5 +1,6 @@
 import { Tabs as Radix } from 'radix-ui';
 import type { ReactNode } from 'react';
+import { tabClass } from './tab-class.ts';
 
 type Props = {
   /** Name of the row of tabs for those who cannot see it. */
@@ -8,10 +9,6 @@ type Props = {
   onChange: (value: string) => void;
   tabs: readonly { value: string; label: ReactNode; content: ReactNode }[];
 };
-
-/** Look of a tab, shared with rows of links that look alike. */
-export const tabClass =
-  '-mb-px inline-flex min-h-10 items-center gap-2 border-b-2 border-transparent px-1 font-semibold whitespace-nowrap text-ink-soft hover:text-ink data-[state=active]:border-copper data-[state=active]:text-ink aria-[current=page]:border-copper aria-[current=page]:text-ink';
 
 export function Tabs({ label, value, onChange, tabs }: Props) {
   return (

@@ -1,0 +1,62 @@
+import { useQueryClient, useMutation } from '@tanstack/react-query';
+import { Link, NavLink, useNavigate } from 'react-router-dom';
+import type { SessionView } from '#core/contract/people.ts';
+import { paths } from '#web/paths.ts';
+import { call } from '#web/server/call.ts';
+import { sessionKey } from '#web/session/session-query.ts';
+import { Button } from '#web/ui/button.tsx';
+import { tabClass } from '#web/ui/tab-class.ts';
+import { toast } from 'sonner';
+import { ThemeSwitch } from './theme-switch.tsx';
+import { Wordmark } from './wordmark.tsx';
+
+/** Name, navigation, theme, who is signed in, the way out. */
+export function Header({ session }: { session: SessionView }) {
+  const client = useQueryClient();
+  const navigate = useNavigate();
+  const signOut = useMutation({
+    mutationFn: () => call('signOut'),
+    onSuccess: async () => {
+      await navigate(paths.signIn(), { state: { signedOut: true } });
+      client.clear();
+      client.setQueryData(sessionKey, null);
+    },
+    onError: (error) => toast.error('You are still signed in', { description: error.message }),
+  });
+  const pages = [
+    { to: paths.assemblies(), label: 'Assemblies', shown: true },
+    { to: paths.library(), label: 'Library', shown: true },
+    { to: paths.team(), label: 'Team', shown: true },
+    { to: paths.audit(), label: 'Audit', shown: session.allowed.includes('read-audit') },
+    { to: paths.mail(), label: 'Mail', shown: session.allowed.includes('read-mail') },
+  ];
+  return (
+    <header className="flex flex-wrap items-stretch gap-x-6 border-b border-line bg-panel px-4 sm:px-8 print:hidden">
+      <Link to={paths.assemblies()} className="flex min-h-12 items-center" aria-label="Dropwatt, all assemblies">
+        <Wordmark />
+      </Link>
+      <nav aria-label="Main" className="flex min-h-12 items-stretch gap-x-5 overflow-x-auto">
+        {pages
+          .filter((page) => page.shown)
+          .map((page) => (
+            <NavLink key={page.to} to={page.to} className={tabClass}>
+              {page.label}
+            </NavLink>
+          ))}
+      </nav>
+      <div className="ml-auto flex min-h-12 flex-wrap items-center gap-x-4 gap-y-1 py-1">
+        <Link
+          to={paths.account()}
+          className="flex min-h-8 max-w-56 flex-col justify-center text-right text-xs leading-tight hover:text-copper"
+        >
+          <span className="truncate font-semibold">{session.member.name}</span>
+          <span className="truncate text-ink-soft">{session.team.name}</span>
+        </Link>
+        <ThemeSwitch name="header-theme" />
+        <Button size="small" variant="quiet" onClick={() => signOut.mutate()} disabled={signOut.isPending}>
+          Sign out
+        </Button>
+      </div>
+    </header>
+  );
+}
