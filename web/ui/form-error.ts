@@ -19,6 +19,6 @@ export function serverFault(error: Error | null, path: string): string | undefin
 }
 
 /** "must have at least 12 characters" → "Must have at least 12 characters." */
-function sentence(message: string): string {
+export function sentence(message: string): string {
   return `${message.charAt(0).toUpperCase()}${message.slice(1)}${/[.!?]$/.test(message) ? '' : '.'}`;
 }

@@ -1,0 +1,24 @@
+import { config } from 'zod/v4/core';
+import { QueryClientProvider } from '@tanstack/react-query';
+import { StrictMode } from 'react';
+import { createRoot } from 'react-dom/client';
+import { createBrowserRouter, RouterProvider } from 'react-router-dom';
+import { startTheme } from './layout/theme.ts';
+import { routes } from './routes.tsx';
+import { queryClient } from './server/query-client.ts';
+import './theme.css';
+
+// The page's content policy refuses code made from text, so the schemas must not try.
+config({ jitless: true });
+startTheme();
+
+const root = document.getElementById('root');
+if (root) {
+  createRoot(root).render(
+    <StrictMode>
+      <QueryClientProvider client={queryClient}>
+        <RouterProvider router={createBrowserRouter(routes)} />
+      </QueryClientProvider>
+    </StrictMode>,
+  );
+}
