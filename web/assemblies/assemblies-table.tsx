@@ -9,7 +9,7 @@ import { VerdictMark } from '#web/ui/verdict-mark.tsx';
 const head = [
   { label: 'Number' },
   { label: 'Title' },
-  { label: 'Newest revision' },
+  { label: 'Revision' },
   { label: 'State' },
   { label: 'Verdict' },
   { label: 'Changed' },
@@ -50,7 +50,7 @@ export function AssembliesTable({ assemblies }: { assemblies: readonly AssemblyV
               {newest?.verdict ? (
                 <VerdictMark verdict={newest.verdict} />
               ) : (
-                <span className="text-ink-soft">Not checked yet</span>
+                <span className="whitespace-nowrap text-ink-soft">Not checked yet</span>
               )}
             </Cell>
             <Cell>{newest ? <Timestamp at={newest.changedAt} /> : '–'}</Cell>

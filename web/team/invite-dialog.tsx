@@ -37,7 +37,8 @@ export function InviteDialog({ onClose }: { onClose: () => void }) {
   });
   const errorAt = (field: 'name' | 'email') => {
     const message = errors[field]?.message;
-    return message ? sentence(message) : serverFault(invite.error, field);
+    if (message) return form.getValues(field).trim() === '' ? 'Cannot be left empty.' : sentence(message);
+    return serverFault(invite.error, field);
   };
   return (
     <Dialog

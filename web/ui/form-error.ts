@@ -8,8 +8,16 @@ export function fieldErrors(schema: z.ZodType, value: unknown): FieldErrors {
   const parsed = schema.safeParse(value);
   if (parsed.success) return {};
   const errors: FieldErrors = {};
-  for (const issue of parsed.error.issues) errors[issue.path.join('.')] ??= sentence(issue.message);
+  for (const issue of parsed.error.issues) {
+    errors[issue.path.join('.')] ??= isBlank(value, issue.path) ? 'Cannot be left empty.' : sentence(issue.message);
+  }
   return errors;
+}
+
+function isBlank(value: unknown, path: readonly PropertyKey[]): boolean {
+  let inner = value;
+  for (const key of path) inner = typeof inner === 'object' && inner !== null ? Reflect.get(inner, key) : undefined;
+  return typeof inner === 'string' && inner.trim() === '';
 }
 
 /** What the server refused at a field, for the same place in the form. */

@@ -30,7 +30,7 @@ const signs: Record<RevisionState, ReactNode> = {
 /** State of a revision as word and sign. */
 export function StateMark({ state }: { state: RevisionState }) {
   return (
-    <span className="inline-flex items-center gap-1.5 whitespace-nowrap">
+    <span className="inline-flex items-baseline gap-1.5 whitespace-nowrap">
       <svg
         aria-hidden="true"
         width="15"
@@ -39,7 +39,7 @@ export function StateMark({ state }: { state: RevisionState }) {
         fill="none"
         stroke="currentColor"
         strokeWidth="1.3"
-        className="shrink-0"
+        className="relative top-[0.14em] shrink-0"
       >
         {signs[state]}
       </svg>

@@ -1,5 +1,6 @@
 import type { ComponentProps, ReactNode } from 'react';
 import { classes } from './classes.ts';
+import { useOverflows } from './use-overflows.ts';
 
 type Props = {
   /** What the table holds, for those who cannot see it. */
@@ -8,11 +9,13 @@ type Props = {
   children: ReactNode;
 };
 
-/** A table that is read: hairlines, heads in words, numbers to the right; wide ones scroll by themselves. */
+/** A table that is read: hairlines, heads in words, numbers to the right; one that is too wide scrolls by itself. */
 export function Table({ caption, head, children }: Props) {
+  const { ref, overflows } = useOverflows();
+  // A table that scrolls takes the focus, so that the keyboard can scroll it too.
+  const scroller = overflows ? { tabIndex: 0, role: 'group', 'aria-label': caption } : {};
   return (
-    // Focusable, so that the keyboard can scroll a table that is wider than the page.
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
+    <div ref={ref} className="overflow-x-auto" {...scroller}>
       <table className="w-full border-collapse text-left">
         <caption className="sr-only">{caption}</caption>
         <thead>

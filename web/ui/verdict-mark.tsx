@@ -35,9 +35,9 @@ export function VerdictMark({ verdict, size = 14, wordHidden = false }: Props) {
   return (
     <span
       title={verdictMeanings[verdict]}
-      className={`inline-flex items-center gap-1.5 font-semibold whitespace-nowrap ${verdictColours[verdict]}`}
+      className={`inline-flex items-baseline gap-1.5 font-semibold whitespace-nowrap ${verdictColours[verdict]}`}
     >
-      <svg aria-hidden="true" width={size} height={size} viewBox="0 0 16 16" className="shrink-0">
+      <svg aria-hidden="true" width={size} height={size} viewBox="0 0 16 16" className="relative top-[0.14em] shrink-0">
         {verdictShapes[verdict]}
       </svg>
       <span className={wordHidden ? 'sr-only' : undefined}>{verdictWords[verdict]}</span>
