@@ -26,7 +26,7 @@ export function AssembliesTable({ assemblies }: { assemblies: readonly AssemblyV
             <Cell className="whitespace-nowrap">
               <Link
                 to={paths.assembly(id)}
-                className="inline-block py-0.5 font-semibold underline decoration-line-strong underline-offset-4 hover:text-copper"
+                className="font-semibold underline decoration-line-strong underline-offset-4 hover:text-copper"
               >
                 {number}
               </Link>

@@ -43,14 +43,14 @@ function RevisionOf({ subject, revisionId, onRevision }: RevisionOfProps) {
     <>
       <Link
         to={paths.review(revisionId)}
-        className="inline-block py-0.5 underline decoration-line-strong underline-offset-4 hover:text-copper"
+        className="underline decoration-line-strong underline-offset-4 hover:text-copper"
       >
         {subject}
       </Link>
       <button
         type="button"
         onClick={() => onRevision(revisionId)}
-        className="block min-h-6 text-sm text-ink-soft underline decoration-line-strong underline-offset-4 hover:text-copper"
+        className="block min-h-6 text-left text-sm text-ink-soft underline decoration-line-strong underline-offset-4 hover:text-copper"
       >
         Only this one<span className="sr-only">: {subject}</span>
       </button>

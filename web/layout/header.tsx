@@ -31,11 +31,14 @@ export function Header({ session }: { session: SessionView }) {
     { to: paths.mail(), label: 'Mail', shown: session.allowed.includes('read-mail') },
   ];
   return (
-    <header className="flex flex-wrap items-stretch gap-x-6 border-b border-line bg-panel px-4 sm:px-8 print:hidden">
+    <header className="flex flex-wrap items-stretch gap-x-4 border-b border-line bg-panel px-4 sm:px-8 md:flex-nowrap lg:gap-x-7 print:hidden">
       <Link to={paths.assemblies()} className="flex min-h-12 items-center" aria-label="Dropwatt, all assemblies">
         <Wordmark />
       </Link>
-      <nav aria-label="Main" className="flex min-h-12 items-stretch gap-x-5 overflow-x-auto">
+      <nav
+        aria-label="Main"
+        className="flex min-h-12 min-w-0 items-stretch gap-x-2 overflow-x-auto text-sm lg:gap-x-5 lg:text-base"
+      >
         {pages
           .filter((page) => page.shown)
           .map((page) => (
@@ -44,16 +47,22 @@ export function Header({ session }: { session: SessionView }) {
             </NavLink>
           ))}
       </nav>
-      <div className="ml-auto flex min-h-12 flex-wrap items-center gap-x-4 gap-y-1 py-1">
+      <div className="ml-auto flex min-h-12 items-center gap-x-3 py-1 lg:gap-x-4">
         <Link
           to={paths.account()}
-          className="flex min-h-8 max-w-56 flex-col justify-center text-right text-xs leading-tight hover:text-copper"
+          className="flex min-h-8 max-w-28 flex-col lg:max-w-56 justify-center text-right text-xs leading-tight hover:text-copper"
         >
           <span className="truncate font-semibold">{session.member.name}</span>
           <span className="truncate text-ink-soft">{session.team.name}</span>
         </Link>
         <ThemeSwitch name="header-theme" />
-        <Button size="small" variant="quiet" onClick={() => signOut.mutate()} disabled={signOut.isPending}>
+        <Button
+          size="small"
+          variant="quiet"
+          className="-mr-2.5"
+          onClick={() => signOut.mutate()}
+          disabled={signOut.isPending}
+        >
           Sign out
         </Button>
       </div>

@@ -6,11 +6,7 @@ export function MailText({ text }: { text: string }) {
     <div className="max-w-prose break-words whitespace-pre-wrap">
       {textPieces(text).map((piece, index) =>
         piece.link ? (
-          <a
-            key={index}
-            href={piece.text}
-            className="inline-block py-0.5 break-all text-copper underline underline-offset-4"
-          >
+          <a key={index} href={piece.text} className="break-all text-copper underline underline-offset-4">
             {piece.text}
           </a>
         ) : (

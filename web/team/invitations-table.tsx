@@ -44,7 +44,7 @@ export function InvitationsTable() {
           {items.map((invitation) => (
             <Row key={invitation.id}>
               <Cell className="font-semibold">{invitation.name}</Cell>
-              <Cell className="break-all">{invitation.email}</Cell>
+              <Cell className="text-sm whitespace-nowrap">{invitation.email}</Cell>
               <Cell>{invitation.roles.map((role) => roleNames[role]).join(', ')}</Cell>
               <Cell>
                 <Timestamp at={invitation.createdAt} dayOnly /> by {invitation.invitedBy}

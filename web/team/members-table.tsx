@@ -23,7 +23,7 @@ export function MembersTable({ members, manages, ownId }: Props) {
               {member.name}
               {member.id === ownId ? <span className="font-normal text-ink-soft"> (you)</span> : null}
             </Cell>
-            <Cell className="break-all">{member.email}</Cell>
+            <Cell className="text-sm whitespace-nowrap">{member.email}</Cell>
             <Cell className="min-w-40">{member.roles.map((role) => roleNames[role]).join(', ')}</Cell>
             <Cell>
               <Timestamp at={member.joinedAt} dayOnly />

@@ -4,11 +4,14 @@ import { Notice } from './notice.tsx';
 
 /** What went wrong in the server's own words, every fault and reason listed, with a way to try again. */
 export function ProblemNotice({ error, retry }: { error: Error; retry?: () => void }) {
-  const action = retry ? (
-    <Button size="small" onClick={retry}>
-      Try again
-    </Button>
-  ) : null;
+  // What is not there, or not allowed, is so the second time too.
+  const final = error instanceof ProblemError && (error.status === 403 || error.status === 404);
+  const action =
+    retry && !final ? (
+      <Button size="small" onClick={retry}>
+        Try again
+      </Button>
+    ) : null;
   if (!(error instanceof ProblemError)) {
     return (
       <Notice tone="stop" alert title="This page met a fault of its own" action={action}>

@@ -19,7 +19,9 @@ export function readQuantity(text: string, unit: string): ReadQuantity {
   const figures = match[1] ?? '';
   const ambiguous = ambiguousThousands(figures);
   if (ambiguous) return { error: ambiguous };
-  const value = Number(plainFigures(figures));
+  const plain = plainFigures(figures);
+  if (plain === null) return { error: `“${figures}” is not a number.` };
+  const value = Number(plain);
   if (!Number.isFinite(value)) return { error: `“${figures}” is not a number that can be stored.` };
   const typedUnit = (match[2] ?? '').trim();
   const converted = convertTyped(value, typedUnit, unit);
@@ -36,13 +38,14 @@ function ambiguousThousands(figures: string): string | null {
   return `“${figures}” can be read in two ways. Write ${match[1]}.${match[2]} or ${match[1]}${match[2]}.`;
 }
 
-/** The last of point and comma is the decimal sign if it stands once; what comes before it parts thousands. */
-function plainFigures(figures: string): string {
-  const last = Math.max(figures.lastIndexOf(','), figures.lastIndexOf('.'));
-  if (last < 0) return figures;
-  const sign = figures[last] ?? '.';
-  const once = figures.indexOf(sign) === last;
-  const whole = figures.slice(0, last).replace(/[.,]/g, '');
-  const rest = figures.slice(last + 1);
-  return once ? `${whole}.${rest}` : whole + rest;
+const simple = /^([+-]?\d*)(?:[.,](\d*))?(e[+-]?\d+)?$/i;
+const grouped = /^([+-]?\d{1,3})([.,])(\d{3}(?:\2\d{3})*)(?:(?!\2)[.,](\d*))?(e[+-]?\d+)?$/i;
+
+/** Figures as the machine reads them; one point or comma is the decimal sign, more part thousands in threes. */
+function plainFigures(figures: string): string | null {
+  const one = simple.exec(figures);
+  if (one) return `${one[1] ?? ''}.${one[2] ?? ''}${one[3] ?? ''}`;
+  const many = grouped.exec(figures);
+  if (!many) return null;
+  return `${many[1] ?? ''}${(many[3] ?? '').replace(/[.,]/g, '')}.${many[4] ?? ''}${many[5] ?? ''}`;
 }
