@@ -1,0 +1,33 @@
+/** Every kind of audit event; a change of data writes exactly one. */
+export const auditKinds = [
+  'team.created',
+  'team.renamed',
+  'member.invited',
+  'member.joined',
+  'member.changed',
+  'member.removed',
+  'invitation.withdrawn',
+  'session.opened',
+  'session.ended',
+  'password.changed',
+  'password.reset-requested',
+  'password.reset',
+  'assembly.created',
+  'assembly.changed',
+  'revision.opened',
+  'sketch.saved',
+  'check.requested',
+  'check.cancelled',
+  'comment.added',
+  'comment.resolved',
+  'revision.submitted',
+  'revision.sent-back',
+  'revision.cleared',
+  'revision.issued',
+  'revision.superseded',
+  'revision.withdrawn',
+  'library.item-stored',
+  'mail.given-up',
+] as const;
+
+export type AuditKind = (typeof auditKinds)[number];
