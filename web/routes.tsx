@@ -6,7 +6,9 @@ import { paths } from './paths.ts';
 import { requireSession } from './session/require-session.ts';
 import { Loading } from './ui/loading.tsx';
 
-const revisionPages: RouteObject[] = [];
+const revisionPages: RouteObject[] = [
+  { path: 'sketch', handle: { fill: true }, lazy: () => import('./editor/sketch-page.tsx') },
+];
 
 /** Every page of the product; each is loaded when it is first opened. `fill`: the page takes the height of the window. */
 export const routes: RouteObject[] = [

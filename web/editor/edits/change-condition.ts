@@ -1,0 +1,13 @@
+import type { Condition } from '#core/board/condition.ts';
+import type { Board } from '#core/board/document.ts';
+import { replaced } from './in-list.ts';
+
+/** Changes one operating condition, found by its name. */
+export function changeCondition(board: Board, name: string, patch: Partial<Condition>): Board {
+  const conditions = replaced(
+    board.conditions,
+    (condition) => condition.name === name,
+    (condition) => ({ ...condition, ...patch }),
+  );
+  return conditions === board.conditions ? board : { ...board, conditions };
+}

@@ -1,0 +1,11 @@
+/** The list with one item replaced; the very same list when nothing changed or nothing fits. */
+export function replaced<T>(list: readonly T[], isMeant: (item: T) => boolean, change: (item: T) => T): T[] {
+  let changed = false;
+  const next = list.map((item) => {
+    if (!isMeant(item)) return item;
+    const after = change(item);
+    changed ||= after !== item;
+    return after;
+  });
+  return changed ? next : (list as T[]);
+}

@@ -1,0 +1,5 @@
+import type { Board } from '#core/board/document.ts';
+
+export function setTitle(board: Board, title: string): Board {
+  return { ...board, title };
+}

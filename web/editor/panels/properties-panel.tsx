@@ -1,0 +1,86 @@
+import { commands } from '../commands/command.ts';
+import { Button } from '#web/ui/button.tsx';
+import { useEditor, useEditorStore } from '../editor-context.ts';
+import { shownBoard } from '../editor-store.ts';
+import { type ObjectKey, idOf, kindOf } from '../object-key.ts';
+import { BoardPanel } from './board-panel.tsx';
+import { ManyPanel } from './many-panel.tsx';
+import { PourPanel } from './pour-panel.tsx';
+import { ProbePanel } from './probe-panel.tsx';
+import { RegulatorPanel } from './regulator-panel.tsx';
+import { RingPanel } from './ring-panel.tsx';
+import { SinkPanel } from './sink-panel.tsx';
+import { SourcePanel } from './source-panel.tsx';
+import { ViaFieldPanel } from './via-field-panel.tsx';
+
+/** What is selected, in figures; the board itself while nothing is. */
+export function PropertiesPanel() {
+  const selection = useEditor((state) => state.selection);
+  const [only] = selection;
+  if (!only) return <BoardPanel />;
+  return (
+    <>
+      {selection.length > 1 ? <ManyPanel keys={selection} /> : <OnePanel key={only} objectKey={only} />}
+      <SelectionActs />
+    </>
+  );
+}
+
+function OnePanel({ objectKey }: { objectKey: ObjectKey }) {
+  const board = useEditor(shownBoard);
+  const id = idOf(objectKey);
+  switch (kindOf(objectKey)) {
+    case 'regulator': {
+      const regulator = board.regulators.find(({ ref }) => ref === id);
+      return regulator ? <RegulatorPanel regulator={regulator} /> : null;
+    }
+    case 'source': {
+      const source = board.sources.find(({ ref }) => ref === id);
+      return source ? <SourcePanel source={source} /> : null;
+    }
+    case 'pour': {
+      const pour = board.pours.find((item) => item.id === id);
+      return pour ? <PourPanel pour={pour} /> : null;
+    }
+    case 'via-field': {
+      const field = board.viaFields.find((item) => item.id === id);
+      return field ? <ViaFieldPanel field={field} /> : null;
+    }
+    case 'sink': {
+      const sink = board.sinks.find((item) => item.id === id);
+      return sink ? <SinkPanel sink={sink} /> : null;
+    }
+    case 'probe': {
+      const probe = board.probes.find((item) => item.id === id);
+      return probe ? <ProbePanel probe={probe} /> : null;
+    }
+    case 'cutout': {
+      const ring = board.outline.cutouts[Number(id)];
+      return ring ? <RingPanel objectKey={objectKey} ring={ring} /> : null;
+    }
+    case 'outline':
+      return <RingPanel objectKey={objectKey} ring={board.outline.points} />;
+  }
+}
+
+/** Acts on the selection that also have keys. */
+function SelectionActs() {
+  const store = useEditorStore();
+  const state = useEditor((present) => present);
+  return (
+    <div className="flex flex-wrap gap-2 px-4 py-3">
+      {[commands.rotate, commands.pickUp, commands.duplicate, commands.delete].map((command) => (
+        <Button
+          key={command.id}
+          size="small"
+          variant={command.id === 'delete' ? 'danger' : 'plain'}
+          disabled={!command.may(state)}
+          title={command.keys.join(', ')}
+          onClick={() => command.run(store)}
+        >
+          {command.id === 'rotate' ? 'Rotate 90°' : command.id === 'pick-up' ? 'Pick up' : command.label}
+        </Button>
+      ))}
+    </div>
+  );
+}

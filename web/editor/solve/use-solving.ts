@@ -1,0 +1,36 @@
+import * as Comlink from 'comlink';
+import { useEffect } from 'react';
+import { formatQuantity } from '#core/format.ts';
+import { announce } from '#web/ui/announce.ts';
+import { verdictWords } from '#web/ui/verdict-words.ts';
+import { activeCheck } from '../canvas/use-heat-picture.ts';
+import type { EditorStore } from '../editor-store.ts';
+import { type ConditionCheck, isCurrent } from './checks.ts';
+import { startSolving } from './solve-loop.ts';
+import type { SolveWorker } from './solve.worker.ts';
+
+/** Runs the calculation in a worker as long as the page is open, and says the settled results aloud. */
+export function useSolving(store: EditorStore): void {
+  useEffect(() => {
+    const worker = new Worker(new URL('./solve.worker.ts', import.meta.url), { type: 'module' });
+    const remote = Comlink.wrap<SolveWorker>(worker);
+    const stop = startSolving(store, (board, condition, cellMm) => remote.solve(board, condition, cellMm));
+    const silence = store.subscribe((state, before) => {
+      const check = activeCheck(state);
+      if (check && check !== activeCheck(before) && isCurrent(check, state.board)) announce(spoken(check));
+    });
+    return () => {
+      stop();
+      silence();
+      worker.terminate();
+    };
+  }, [store]);
+}
+
+/** Junction temperatures and verdicts of a condition in one sentence. */
+export function spoken({ condition }: ConditionCheck): string {
+  const parts = condition.regulators.map(
+    (regulator) => `${regulator.ref} ${formatQuantity(regulator.junctionC, '°C')}, ${verdictWords[regulator.verdict]}`,
+  );
+  return `${condition.name}: ${verdictWords[condition.verdict]}. ${parts.join('; ')}`;
+}

@@ -1,0 +1,60 @@
+import type { HeatField } from '#core/thermal/heat-field.ts';
+
+/** A layer's cells with a rim of two, and every empty cell beside the board filled, so that bands reach the board's edge. */
+export type PaddedGrid = { columns: number; rows: number; valuesC: Float64Array; xMm: Float64Array; yMm: Float64Array };
+
+const rim = 2;
+
+/** @returns null when the field has no layer of that name or no temperature in it */
+export function paddedGrid(field: HeatField, layerName: string): PaddedGrid | null {
+  const layer = field.layers.find((candidate) => candidate.name === layerName);
+  if (!layer) return null;
+  const columns = field.columns + 2 * rim;
+  const rows = field.rows + 2 * rim;
+  const valuesC = new Float64Array(columns * rows).fill(NaN);
+  for (let row = 0; row < field.rows; row++) {
+    for (let column = 0; column < field.columns; column++) {
+      valuesC[(row + rim) * columns + column + rim] = layer.temperatureC[row * field.columns + column] ?? NaN;
+    }
+  }
+  if (!valuesC.some((value) => Number.isFinite(value))) return null;
+  for (let pass = 0; pass < rim; pass++) spread(valuesC, columns, rows);
+  return { columns, rows, valuesC, xMm: centres(field.xEdgesMm), yMm: centres(field.yEdgesMm) };
+}
+
+/** Gives every empty cell the mean of its filled neighbours. */
+function spread(valuesC: Float64Array, columns: number, rows: number): void {
+  const before = valuesC.slice();
+  for (let row = 0; row < rows; row++) {
+    for (let column = 0; column < columns; column++) {
+      if (Number.isFinite(before[row * columns + column])) continue;
+      let sum = 0;
+      let count = 0;
+      for (let dy = -1; dy <= 1; dy++) {
+        for (let dx = -1; dx <= 1; dx++) {
+          const x = column + dx;
+          const y = row + dy;
+          if (x < 0 || y < 0 || x >= columns || y >= rows) continue;
+          const value = before[y * columns + x] ?? NaN;
+          if (!Number.isFinite(value)) continue;
+          sum += value;
+          count++;
+        }
+      }
+      if (count > 0) valuesC[row * columns + column] = sum / count;
+    }
+  }
+}
+
+/** Cell centres with the rim, mm. */
+function centres(edgesMm: Float64Array): Float64Array {
+  const count = edgesMm.length - 1;
+  const first = (edgesMm[1] ?? 0) - (edgesMm[0] ?? 0);
+  const last = (edgesMm[count] ?? 0) - (edgesMm[count - 1] ?? 0);
+  return Float64Array.from({ length: count + 2 * rim }, (_, place) => {
+    const index = place - rim;
+    if (index < 0) return (edgesMm[0] ?? 0) + (index + 0.5) * first;
+    if (index >= count) return (edgesMm[count] ?? 0) + (index - count + 0.5) * last;
+    return ((edgesMm[index] ?? 0) + (edgesMm[index + 1] ?? 0)) / 2;
+  });
+}
