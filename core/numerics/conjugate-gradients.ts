@@ -1,0 +1,82 @@
+/** Why an iteration ended, and how well its answer fulfils the equations. */
+export type IterationRecord = {
+  status: 'converged' | 'not-converged' | 'breakdown';
+  iterations: number;
+  /** ‖b − A·x‖ ÷ ‖b‖, computed anew from the answer. */
+  residual: number;
+};
+
+export type LinearSystem = {
+  multiply: (x: Float64Array, y: Float64Array) => void;
+  precondition: (r: Float64Array, z: Float64Array) => void;
+};
+
+/**
+ * Preconditioned conjugate gradients for a symmetric positive definite system, from the `x` that is given.
+ * Steps as in Templates for the Solution of Linear Systems (Barrett et al. 1994), figure 2.5. The true residual is
+ * computed at the end; when it lags behind the recursive one the iteration is restarted from the answer.
+ * @param work six vectors of the length of b, so that a solve allocates nothing
+ */
+export function conjugateGradients(
+  system: LinearSystem,
+  b: Float64Array,
+  x: Float64Array,
+  options: { tolerance: number; maximumIterations: number; work: ConjugateWork },
+): IterationRecord {
+  const { r, z, p, q } = options.work;
+  const target = options.tolerance * norm(b);
+  let iterations = 0;
+  for (let restart = 0; restart < 4; restart++) {
+    system.multiply(x, q);
+    for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
+    if (norm(r) <= target || target === 0) break;
+    let rho = 0;
+    for (let step = 0; iterations < options.maximumIterations; step++) {
+      system.precondition(r, z);
+      const next = dot(r, z);
+      if (step === 0) p.set(z);
+      else {
+        const beta = next / rho;
+        for (let n = 0; n < p.length; n++) p[n] = z[n]! + beta * p[n]!;
+      }
+      rho = next;
+      system.multiply(p, q);
+      const curvature = dot(p, q);
+      if (!(curvature > 0) || !(rho > 0))
+        return { status: 'breakdown', iterations, residual: residualOf(system, b, x, options.work) };
+      const alpha = rho / curvature;
+      for (let n = 0; n < x.length; n++) {
+        x[n]! += alpha * p[n]!;
+        r[n]! -= alpha * q[n]!;
+      }
+      iterations++;
+      if (norm(r) <= target) break;
+    }
+    if (iterations >= options.maximumIterations) break;
+  }
+  const residual = residualOf(system, b, x, options.work);
+  // The recursive residual may undercut the true one by rounding only.
+  return { status: residual <= options.tolerance * 1.5 ? 'converged' : 'not-converged', iterations, residual };
+}
+
+export type ConjugateWork = { r: Float64Array; z: Float64Array; p: Float64Array; q: Float64Array };
+
+export function conjugateWork(length: number): ConjugateWork {
+  const vector = () => new Float64Array(length);
+  return { r: vector(), z: vector(), p: vector(), q: vector() };
+}
+
+function residualOf(system: LinearSystem, b: Float64Array, x: Float64Array, { r, q }: ConjugateWork): number {
+  system.multiply(x, q);
+  for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
+  const scale = norm(b);
+  return scale === 0 ? norm(r) : norm(r) / scale;
+}
+
+function dot(a: Float64Array, b: Float64Array): number {
+  let s = 0;
+  for (let n = 0; n < a.length; n++) s += a[n]! * b[n]!;
+  return s;
+}
+
+const norm = (a: Float64Array) => Math.sqrt(dot(a, a));

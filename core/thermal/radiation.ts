@@ -1,0 +1,7 @@
+/** Stefan–Boltzmann constant, W/(m²·K⁴) (CODATA). */
+const sigma = 5.670374419e-8;
+
+/** Radiation to black surroundings at air temperature as a film coefficient, W/(m²·K): ε·σ·(Ts² + Ta²)·(Ts + Ta). */
+export function radiationFilm(emissivity: number, surfaceK: number, ambientK: number): number {
+  return emissivity * sigma * (surfaceK * surfaceK + ambientK * ambientK) * (surfaceK + ambientK);
+}
