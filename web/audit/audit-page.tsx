@@ -1,5 +1,6 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { Link, useSearchParams } from 'react-router-dom';
+import { auditKinds } from '#core/review/audit-kinds.ts';
 import { paths } from '#web/paths.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Empty } from '#web/ui/empty.tsx';
@@ -7,7 +8,6 @@ import { Loading } from '#web/ui/loading.tsx';
 import { Page } from '#web/ui/page.tsx';
 import { ProblemNotice } from '#web/ui/problem-notice.tsx';
 import { SelectField } from '#web/ui/select-field.tsx';
-import { auditKinds } from './audit-kinds.ts';
 import { auditQuery } from './audit-query.ts';
 import { EventsTable } from './events-table.tsx';
 import { eventWords } from './event-words.ts';
@@ -18,7 +18,6 @@ export function Component() {
   const revisionId = search.get('revision') ?? '';
   const audit = useInfiniteQuery(auditQuery({ ...(kind && { kind }), ...(revisionId && { revisionId }) }));
   const events = audit.data?.pages.flatMap((page) => page.items) ?? [];
-  const kinds = [...new Set([...auditKinds, ...(kind ? [kind] : []), ...events.map((event) => event.kind)])].sort();
   const filter = (next: { kind?: string; revision?: string }) =>
     setSearch(
       Object.fromEntries(Object.entries({ kind, revision: revisionId, ...next }).filter(([, value]) => value)),
@@ -39,7 +38,7 @@ export function Component() {
             onChange={(value) => filter({ kind: value })}
             options={[
               { value: '', label: 'Every kind' },
-              ...kinds.map((value) => ({ value, label: eventWords(value) })),
+              ...auditKinds.map((value) => ({ value, label: eventWords(value) })),
             ]}
           />
         </div>

@@ -1,5 +1,5 @@
 import { useQueryClient, useMutation } from '@tanstack/react-query';
-import { Link, NavLink, useNavigate } from 'react-router-dom';
+import { Link, useLocation, useNavigate } from 'react-router-dom';
 import type { SessionView } from '#core/contract/people.ts';
 import { paths } from '#web/paths.ts';
 import { call } from '#web/server/call.ts';
@@ -14,6 +14,7 @@ import { Wordmark } from './wordmark.tsx';
 export function Header({ session }: { session: SessionView }) {
   const client = useQueryClient();
   const navigate = useNavigate();
+  const { pathname } = useLocation();
   const signOut = useMutation({
     mutationFn: () => call('signOut'),
     onSuccess: async () => {
@@ -24,7 +25,7 @@ export function Header({ session }: { session: SessionView }) {
     onError: (error) => toast.error('You are still signed in', { description: error.message }),
   });
   const pages = [
-    { to: paths.assemblies(), label: 'Assemblies', shown: true },
+    { to: paths.assemblies(), label: 'Assemblies', shown: true, also: '/revisions/' },
     { to: paths.library(), label: 'Library', shown: true },
     { to: paths.team(), label: 'Team', shown: true },
     { to: paths.audit(), label: 'Audit', shown: session.allowed.includes('read-audit') },
@@ -42,9 +43,16 @@ export function Header({ session }: { session: SessionView }) {
         {pages
           .filter((page) => page.shown)
           .map((page) => (
-            <NavLink key={page.to} to={page.to} className={tabClass}>
+            <Link
+              key={page.to}
+              to={page.to}
+              aria-current={
+                pathname.startsWith(page.to) || (page.also && pathname.startsWith(page.also)) ? 'page' : undefined
+              }
+              className={tabClass}
+            >
               {page.label}
-            </NavLink>
+            </Link>
           ))}
       </nav>
       <div className="ml-auto flex min-h-12 items-center gap-x-3 py-1 lg:gap-x-4">

@@ -1,5 +1,6 @@
 import { Outlet, ScrollRestoration } from 'react-router-dom';
 import { Toaster } from 'sonner';
+import { NavigationProgress } from './navigation-progress.tsx';
 import { LiveRegion } from '#web/ui/live-region.tsx';
 
 /** What every page has, signed in or not. */
@@ -12,6 +13,7 @@ export function Root() {
       >
         Skip to the content
       </a>
+      <NavigationProgress />
       <Outlet />
       <ScrollRestoration />
       <LiveRegion />

@@ -77,7 +77,7 @@ export function Component() {
             <Icon name="arrowRight" size={14} />
           </Link>
         </div>
-        <nav aria-label={`Revision ${letter}`} className="flex gap-6 overflow-x-auto print:hidden">
+        <nav aria-label={`Revision ${letter}`} className="relative flex gap-4 overflow-x-auto sm:gap-6 print:hidden">
           {views.map(({ view, label }) => (
             <NavLink key={view} to={paths[view](revisionId, { condition })} className={tabClass}>
               {label}

@@ -15,7 +15,7 @@ export function Table({ caption, head, children }: Props) {
   // A table that scrolls takes the focus, so that the keyboard can scroll it too.
   const scroller = overflows ? { tabIndex: 0, role: 'group', 'aria-label': caption } : {};
   return (
-    <div ref={ref} className="overflow-x-auto" {...scroller}>
+    <div ref={ref} className="relative overflow-x-auto" {...scroller}>
       <table className="w-full border-collapse text-left">
         <caption className="sr-only">{caption}</caption>
         <thead>
