@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { Navigate, Outlet, useLocation, useMatches } from 'react-router-dom';
 import { paths } from '#web/paths.ts';
+import { SessionEnding } from '#web/session/session-ending.tsx';
 import { sessionQuery } from '#web/session/session-query.ts';
 import { useFocusAfterNavigation } from './focus-after-navigation.ts';
 import { Header } from './header.tsx';
@@ -25,6 +26,7 @@ export function SignedIn() {
     <div className={fill ? 'flex h-dvh min-h-[36rem] flex-col' : 'flex min-h-dvh flex-col'}>
       <Header session={session} />
       <OfflineNotice />
+      <SessionEnding session={session} />
       <main id="content" tabIndex={-1} className="flex min-h-0 min-w-0 flex-1 flex-col outline-none">
         <Outlet />
       </main>

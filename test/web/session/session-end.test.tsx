@@ -20,7 +20,7 @@ const session: SessionView = {
   },
   team: { id: '0b6f3a3c-52b9-4a3e-9d41-6f5d1f0a7c02', name: 'Drive Electronics' },
   allowed: [],
-  expiresAt: '2026-12-01T10:00:00Z',
+  expiresAt: '2099-01-01T10:00:00Z',
 };
 
 beforeEach(() => {
