@@ -1,8 +1,9 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useParams } from 'react-router-dom';
+import { Link, useParams } from 'react-router-dom';
 import { paths } from '#web/paths.ts';
 import { sessionQuery } from '#web/session/session-query.ts';
+import { buttonClass } from '#web/ui/button-class.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Loading } from '#web/ui/loading.tsx';
 import { Page } from '#web/ui/page.tsx';
@@ -24,7 +25,12 @@ export function Component() {
     return (
       <Page title="Assembly" trail={trail}>
         {assembly.error ? (
-          <ProblemNotice error={assembly.error} retry={() => void assembly.refetch()} />
+          <>
+            <ProblemNotice error={assembly.error} retry={() => void assembly.refetch()} />
+            <Link to={paths.assemblies()} className={`mt-6 ${buttonClass()}`}>
+              All assemblies
+            </Link>
+          </>
         ) : (
           <Loading what="the assembly" />
         )}

@@ -1,65 +1,44 @@
+import { role, roleNames } from '#core/review/role.ts';
+
 /** "revision.sent-back" → "Revision sent back". */
 export function eventWords(kind: string): string {
   const words = kind.replace(/[._:-]+/g, ' ').trim();
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
-/** "sketchVersion" → "sketch version"; a name with a unit keeps its letters. */
-export function factWords(key: string): string {
-  return key
-    .replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`)
-    .replace(/[._-]+/g, ' ');
+/** "sketchHash" → "sketch hash". */
+function factWords(key: string): string {
+  return key.replace(/([a-z])([A-Z])/g, (_, before: string, after: string) => `${before} ${after.toLowerCase()}`);
 }
 
-/** A fact in one line: text as it is, yes and no, lists joined, the rest as JSON. */
-export function factValue(value: unknown): string {
+/** A fact in one line: text as it is, roles and yes or no in words, lists joined, long hashes by their beginning. */
+function factValue(value: unknown): string {
   if (value === null || value === undefined || value === '') return '–';
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
-  if (typeof value === 'string' || typeof value === 'number') return String(value);
+  if (typeof value === 'number') return String(value);
+  if (typeof value === 'string') return textValue(value);
   if (Array.isArray(value)) return value.length === 0 ? '–' : value.map(factValue).join(', ');
   return Object.entries(value)
-    .map(([key, inner]) => `${factWords(key)}: ${factValue(inner)}`)
-    .join('; ');
+    .filter(([, inner]) => inner !== null)
+    .map(([key, inner]) => `${factWords(key)} ${factValue(inner)}`)
+    .join(', ');
+}
+
+function textValue(text: string): string {
+  const known = role.safeParse(text);
+  if (known.success) return roleNames[known.data].toLowerCase();
+  return text.replace(/\b((?:sha256:)?[0-9a-f]{12})[0-9a-f]{52}\b/g, '$1…');
 }
 
 export type Fact = { name: string; before?: string; value: string };
 
-/**
- * Facts of an event as lines. A pair of old and new value becomes one line, whether it is written
- * as `{ old, new }`, as `{ from, to }`, or as two lists of fields beside each other.
- */
+/** Facts of an event as lines; `{ from, to }` becomes one line with the old and the new value. */
 export function factLines(facts: Record<string, unknown>): Fact[] {
-  for (const [before, after] of pairs) {
-    if (isRecord(facts[before]) && isRecord(facts[after])) {
-      const { [before]: older, [after]: newer, ...rest } = facts;
-      return [...changed(older as Record<string, unknown>, newer as Record<string, unknown>), ...factLines(rest)];
-    }
-    if (before in facts && after in facts) {
-      const { [before]: older, [after]: newer, ...rest } = facts;
-      return [{ name: 'change', before: factValue(older), value: factValue(newer) }, ...factLines(rest)];
-    }
-  }
   return Object.entries(facts).map(([key, value]) => {
-    const pair = isRecord(value) ? pairs.find(([before, after]) => before in value && after in value) : undefined;
-    if (pair && isRecord(value)) {
-      return { name: factWords(key), before: factValue(value[pair[0]]), value: factValue(value[pair[1]]) };
+    const name = factWords(key);
+    if (typeof value === 'object' && value !== null && 'from' in value && 'to' in value) {
+      return { name, before: factValue(value.from), value: factValue(value.to) };
     }
-    return { name: factWords(key), value: factValue(value) };
+    return { name, value: factValue(value) };
   });
-}
-
-const pairs = [
-  ['old', 'new'],
-  ['from', 'to'],
-  ['before', 'after'],
-] as const;
-
-function isRecord(value: unknown): value is Record<string, unknown> {
-  return typeof value === 'object' && value !== null && !Array.isArray(value);
-}
-
-function changed(before: Record<string, unknown>, after: Record<string, unknown>): Fact[] {
-  return [...new Set([...Object.keys(before), ...Object.keys(after)])]
-    .map((key) => ({ name: factWords(key), before: factValue(before[key]), value: factValue(after[key]) }))
-    .filter((fact) => fact.before !== fact.value);
 }
