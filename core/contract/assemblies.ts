@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { boardDocument } from '#core/board/document.ts';
 import { verdict } from '#core/result/result.ts';
 import { revisionState } from '#core/review/revision-state.ts';
-import { id, timestamp, typedText } from './identifier.ts';
+import { id, timestamp, typedLine } from './identifier.ts';
 
 export const revisionAction = z.enum([
   'edit',
@@ -39,14 +39,14 @@ export const assemblyView = z
   .meta({ id: 'Assembly' });
 
 export const createAssemblyBody = z.strictObject({
-  number: typedText(40),
-  title: typedText(200),
+  number: typedLine(40),
+  title: typedLine(200),
   /** Starting sketch; a blank board when left out. */
   board: boardDocument.optional(),
 });
 export const changeAssemblyBody = z.strictObject({
-  number: typedText(40).optional(),
-  title: typedText(200).optional(),
+  number: typedLine(40).optional(),
+  title: typedLine(200).optional(),
 });
 export const openNextRevisionBody = z.strictObject({ from: id });
 

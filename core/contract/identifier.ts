@@ -16,3 +16,8 @@ export function typedText(maximum: number, minimum = 1) {
     .max(maximum, { error })
     .refine((value) => !/[^\P{Cc}\n\r\t]|\p{Cs}/u.test(value), { error });
 }
+
+/** As `typedText`, on one line: what may stand in the subject of a mail or in a file name. */
+export function typedLine(maximum: number) {
+  return typedText(maximum).refine((value) => !/[\n\r\t]/.test(value), { error: 'must be one line of text' });
+}

@@ -12,7 +12,8 @@ export type TeamAction = 'create-assembly' | 'read-audit' | 'manage-members' | '
 type Rule = { roles: readonly Role[]; states: readonly RevisionState[]; notAuthor?: true };
 
 const editors = ['layout-designer', 'hardware-lead'] as const;
-const technical = [
+/** Everybody who works on boards; an administrator alone does not. */
+export const technicalRoles = [
   'layout-designer',
   'thermal-reviewer',
   'quality-engineer',
@@ -23,8 +24,8 @@ const open = ['sketch', 'in review', 'sent back', 'cleared'] as const;
 
 export const revisionRules: Record<RevisionAction, Rule> = {
   edit: { roles: editors, states: ['sketch', 'sent back'] },
-  solve: { roles: technical, states: open },
-  comment: { roles: technical, states: open },
+  solve: { roles: technicalRoles, states: open },
+  comment: { roles: technicalRoles, states: open },
   submit: { roles: editors, states: transitions.submit.from },
   'send-back': { roles: ['thermal-reviewer'], states: transitions['send-back'].from },
   clear: { roles: ['thermal-reviewer'], states: transitions.clear.from, notAuthor: true },

@@ -1,3 +1,5 @@
+import type { Condition } from '#core/board/condition.ts';
+
 /** Method version: any change in the numbers is a new one, with a line here; stored results keep theirs. */
 export const methodVersion = '1.0.0';
 
@@ -13,4 +15,12 @@ export const maximumIterations = 400;
  * Model error as a share of the rise, one standard deviation, from the published boards: 13 % in still air over all
  * families; moving air has few published cases, so the double is stated.
  */
-export const modelErrorShare = { still: 0.13, moving: 0.26, fixed: 0.05 };
+const modelErrorShare = { still: 0.13, moving: 0.26, fixed: 0.05 };
+
+/** Share for a condition: fixed films carry no correlation, a stopped fan is still air. */
+export function modelErrorShareOf(condition: Condition): number {
+  if (condition.filmWPerM2K !== null) return modelErrorShare.fixed;
+  return condition.air.kind === 'moving' && condition.fault?.kind !== 'fan-stopped'
+    ? modelErrorShare.moving
+    : modelErrorShare.still;
+}

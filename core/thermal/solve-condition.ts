@@ -5,7 +5,7 @@ import { buildBoardModel, type BoardModel } from './board-model.ts';
 import { energyBalance } from './energy-balance.ts';
 import { gridError } from './grid-error.ts';
 import { heatField } from './heat-field-of.ts';
-import { energyLimit, modelErrorShare } from './method.ts';
+import { energyLimit, modelErrorShareOf } from './method.ts';
 import { noticesOf } from './notices.ts';
 import { probeTemperature } from './probe-temperature.ts';
 import type { HeatInput, RegulatorHeat, ThermalSolution } from './solution.ts';
@@ -29,7 +29,7 @@ export function solveCondition(
     solved.status === 'converged' && !(energy.imbalance <= energyLimit) ? ('not-converged' as const) : solved.status;
   const ledger = status === 'converged' ? adjointLedger(model, heat) : [];
   const coarser = options.gridError && status === 'converged' ? coarserJunctions(model, condition, heat) : [];
-  const share = shareOf(condition);
+  const share = modelErrorShareOf(condition);
   const regulators = new Map<string, RegulatorHeat>();
   model.packages.forEach((nodes, index) => {
     const junctionK = solved.rise[nodes.junction]!;
@@ -82,23 +82,24 @@ export function solveCondition(
 /** Node rises behind a solution, for warm starts, without making them part of the result. */
 const startOf = new WeakMap<ThermalSolution, Rises>();
 
-function shareOf(condition: Condition): number {
-  if (condition.filmWPerM2K !== null) return modelErrorShare.fixed;
-  return condition.air.kind === 'moving' && condition.fault?.kind !== 'fan-stopped'
-    ? modelErrorShare.moving
-    : modelErrorShare.still;
-}
-
 const worst = (values: (number | null)[]) =>
   values.every((value) => value === null) ? null : Math.max(...values.map((value) => value ?? 0));
 
 function coarserJunctions(model: BoardModel, condition: Condition, heat: HeatInput): Map<string, number>[] {
-  const cellMm = Math.max(model.grid.dxMm, model.grid.dyMm);
-  return [2, 4].map((factor) => {
-    const coarse = buildBoardModel(model.board, { cellMm: cellMm * factor });
+  const coarser = coarserOf.get(model) ?? coarserModels(model);
+  coarserOf.set(model, coarser);
+  return coarser.map((coarse) => {
     const { rise } = solveRises(coarse, condition, heat);
     return new Map(coarse.packages.map((nodes) => [nodes.ref, rise[nodes.junction]!]));
   });
+}
+
+/** Coarser models of a model, so that many conditions share them. */
+const coarserOf = new WeakMap<BoardModel, BoardModel[]>();
+
+function coarserModels(model: BoardModel): BoardModel[] {
+  const cellMm = Math.max(model.grid.dxMm, model.grid.dyMm);
+  return [2, 4].map((factor) => buildBoardModel(model.board, { cellMm: cellMm * factor }));
 }
 
 function hottestLand(model: BoardModel, { rise }: Rises, index: number): number {

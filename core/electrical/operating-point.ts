@@ -1,0 +1,19 @@
+/** A regulator in one condition, designers' units; null where an input is missing. */
+export type OperatingPoint = {
+  ref: string;
+  /** At the pin, after the dropper: the highest input of the condition. */
+  inputV: number | null;
+  /** The lowest output within the tolerance, or what is left of the input in dropout. */
+  outputV: number | null;
+  outputA: number | null;
+  groundA: number | null;
+  dissipationW: number | null;
+  /** Whether the output is held at the condition's input. */
+  regulating: boolean | null;
+  /** Lowest input − droppers − highest output − dropout, V. */
+  headroomV: number | null;
+  /** Heat of its dropper, W. */
+  dropperW: number;
+  /** What is missing, in words. */
+  missing: string[];
+};
