@@ -52,8 +52,7 @@ export function RevisionsTable({ number, revisions }: { number: string; revision
                   to={to(id)}
                   className="inline-block py-0.5 text-sm underline decoration-line-strong underline-offset-4 hover:text-copper"
                 >
-                  {label}
-                  <span className="sr-only"> of revision {letter}</span>
+                  {label} <span className="sr-only">of revision {letter}</span>
                 </Link>
               ))}
             </span>

@@ -83,8 +83,7 @@ export function Component() {
               {label}
               {view === 'review' && openComments > 0 ? (
                 <span className="text-sm font-normal">
-                  {openComments}
-                  <span className="sr-only"> open comments</span>
+                  {openComments} <span className="sr-only">open comments</span>
                 </span>
               ) : null}
             </NavLink>

@@ -54,7 +54,7 @@ export function InvitationsTable() {
               </Cell>
               <Cell className="text-right">
                 <Button size="small" variant="danger" onClick={() => setWithdrawing(invitation)}>
-                  Withdraw<span className="sr-only"> the invitation of {invitation.name}</span>
+                  Withdraw <span className="sr-only">the invitation of {invitation.name}</span>
                 </Button>
               </Cell>
             </Row>

@@ -38,11 +38,11 @@ export function MembersTable({ members, manages, ownId }: Props) {
                 {member.removedAt ? null : (
                   <span className="flex justify-end gap-2">
                     <Button size="small" onClick={() => setChanging(member)}>
-                      Change<span className="sr-only"> {member.name}</span>
+                      Change <span className="sr-only">{member.name}</span>
                     </Button>
                     {member.id === ownId ? null : (
                       <Button size="small" variant="danger" onClick={() => setRemoving(member)}>
-                        Remove<span className="sr-only"> {member.name}</span>
+                        Remove <span className="sr-only">{member.name}</span>
                       </Button>
                     )}
                   </span>

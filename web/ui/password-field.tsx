@@ -35,8 +35,7 @@ export function PasswordField({ label, hint, error, ...input }: Props) {
             className="inline-flex min-h-10 w-24 shrink-0 items-center justify-center gap-2 rounded-sm border border-line-strong bg-panel text-sm font-semibold hover:border-ink"
           >
             <Icon name={shown ? 'eyeClosed' : 'eye'} />
-            {shown ? 'Hide' : 'Show'}
-            <span className="sr-only"> password</span>
+            {shown ? 'Hide' : 'Show'} <span className="sr-only">password</span>
           </button>
         </div>
       )}
