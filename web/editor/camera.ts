@@ -41,18 +41,24 @@ export function panned(camera: Camera, dx: number, dy: number): Camera {
   };
 }
 
-/** Shows all of the points with a margin around them. */
-export function fitted(points: readonly (readonly [number, number])[], view: ViewSize, marginPx = 44): Camera {
+/** Pixels along the edges that other things lie over. */
+export type Insets = { left: number; right: number; top: number; bottom: number };
+
+/** Shows all of the points between the insets. */
+export function fitted(points: readonly (readonly [number, number])[], view: ViewSize, insets: Insets): Camera {
   const xs = points.map((point) => point[0]);
   const ys = points.map((point) => point[1]);
   const [left, right] = [Math.min(...xs), Math.max(...xs)];
   const [bottom, top] = [Math.min(...ys), Math.max(...ys)];
-  const pxPerMm = Math.min(
-    (view.width - 2 * marginPx) / Math.max(right - left, 1),
-    (view.height - 2 * marginPx) / Math.max(top - bottom, 1),
-  );
+  const width = Math.max(1, view.width - insets.left - insets.right);
+  const height = Math.max(1, view.height - insets.top - insets.bottom);
+  const fill = Math.min(width / Math.max(right - left, 1), height / Math.max(top - bottom, 1));
+  const pxPerMm = Math.min(closest, Math.max(furthest, fill));
   return {
-    centreMm: [(left + right) / 2, (bottom + top) / 2],
-    pxPerMm: Math.min(closest, Math.max(furthest, pxPerMm)),
+    centreMm: [
+      (left + right) / 2 - (insets.left - insets.right) / 2 / pxPerMm,
+      (bottom + top) / 2 + (insets.top - insets.bottom) / 2 / pxPerMm,
+    ],
+    pxPerMm,
   };
 }

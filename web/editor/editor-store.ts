@@ -37,6 +37,7 @@ export type EditorState = {
   readOnly: string | null;
   savedBoard: Board;
   savedVersion: number;
+  savedAt: string;
   save: SaveState;
   checks: Checks;
 };
@@ -67,6 +68,7 @@ export function createEditorStore({ board, version, savedAt, readOnly }: Opening
     readOnly,
     savedBoard: board,
     savedVersion: version,
+    savedAt,
     save: { kind: 'saved', at: savedAt },
     checks: noChecks,
   }));
@@ -129,6 +131,7 @@ export function adopt(store: EditorStore, name: string, board: Board, version: n
     gesture: idle,
     savedBoard: board,
     savedVersion: version,
+    savedAt,
     save: { kind: 'saved', at: savedAt },
   });
 }

@@ -1,11 +1,14 @@
 import { fitted, zoomedAt } from './camera.ts';
 import { type EditorStore, shownBoard } from './editor-store.ts';
 
+/** Rulers at the left and above, the zoom buttons below; some air everywhere. */
+const insets = { left: 44, right: 22, top: 42, bottom: 48 };
+
 /** Shows the whole board. */
 export function fitBoard(store: EditorStore): void {
   const state = store.getState();
   if (state.view.width === 0) return;
-  store.setState({ camera: fitted(shownBoard(state).outline.points, state.view) });
+  store.setState({ camera: fitted(shownBoard(state).outline.points, state.view, insets) });
 }
 
 /** Zooms about the middle of the picture. */

@@ -1,34 +1,20 @@
 import type { ViaField } from '#core/board/copper.ts';
 import type { Board } from '#core/board/document.ts';
-import type { Point, Ring } from '#core/board/outline.ts';
+import type { Ring } from '#core/board/outline.ts';
 import type { Regulator } from '#core/board/placement.ts';
+import { placedRectangle } from '#core/geometry/placed-rectangle.ts';
 
 type Mm = readonly [number, number];
 
-/** Corners of a rectangle about its centre, counter-clockwise from the lower left one, mm. */
+/** Corners of a rectangle about its centre, mm. */
 export function rectangleRing(at: Mm, size: readonly number[], rotationDeg: number): Ring {
-  const [w = 0, h = 0] = size;
-  return (
-    [
-      [-w / 2, -h / 2],
-      [w / 2, -h / 2],
-      [w / 2, h / 2],
-      [-w / 2, h / 2],
-    ] as const
-  ).map((corner) => placed(corner, at, rotationDeg, false));
-}
-
-/** A point of a part's own drawing on the board; parts below are seen through the board, so x is mirrored first. */
-export function placed([x, y]: Mm, at: Mm, rotationDeg: number, mirrored: boolean): Point {
-  const angle = (rotationDeg * Math.PI) / 180;
-  const [cos, sin] = [Math.cos(angle), Math.sin(angle)];
-  const own = mirrored ? -x : x;
-  return [at[0] + own * cos - y * sin, at[1] + own * sin + y * cos];
+  const [width = 0, height = 0] = size;
+  return placedRectangle({ at, rotationDeg, side: 'top' }, [0, 0], [width, height]);
 }
 
 export function bodyRing(board: Board, regulator: Regulator): Ring | null {
   const model = packageOf(board, regulator);
-  return model ? placedRectangle([0, 0], model.bodyMm, regulator) : null;
+  return model ? placedRectangle(regulator, [0, 0], [model.bodyMm[0], model.bodyMm[1]]) : null;
 }
 
 export type LandRing = { land: string; kind: 'tab' | 'lead'; ring: Ring };
@@ -39,7 +25,7 @@ export function landRings(board: Board, regulator: Regulator): LandRing[] {
     land.pads.map((pad) => ({
       land: land.name,
       kind: land.kind,
-      ring: placedRectangle(pad.at, pad.sizeMm, regulator),
+      ring: placedRectangle(regulator, pad.at, pad.sizeMm),
     })),
   );
 }
@@ -47,12 +33,6 @@ export function landRings(board: Board, regulator: Regulator): LandRing[] {
 export function packageOf(board: Board, regulator: Regulator) {
   const part = board.parts[regulator.part];
   return part ? board.packages[part.package] : undefined;
-}
-
-function placedRectangle(centre: Mm, size: readonly number[], regulator: Regulator): Ring {
-  return rectangleRing(centre, size, 0).map((corner) =>
-    placed(corner, regulator.at, regulator.rotationDeg, regulator.side === 'bottom'),
-  );
 }
 
 export function pitchOf(field: ViaField): [number, number] {
@@ -64,17 +44,6 @@ export function viaFieldRing(field: ViaField): Ring {
   const [px, py] = pitchOf(field);
   const outer = field.drillMm + (2 * field.platingUm) / 1000;
   return rectangleRing(field.at, [(field.columns - 1) * px + outer, (field.rows - 1) * py + outer], field.rotationDeg);
-}
-
-/** Even-odd rule; points on the edge may fall on either side. */
-export function contains(ring: readonly Mm[], [x, y]: Mm): boolean {
-  let inside = false;
-  for (let index = 0, before = ring.length - 1; index < ring.length; before = index++) {
-    const [xi, yi] = ring[index] ?? [0, 0];
-    const [xj, yj] = ring[before] ?? [0, 0];
-    if (yi > y !== yj > y && x < ((xj - xi) * (y - yi)) / (yj - yi) + xi) inside = !inside;
-  }
-  return inside;
 }
 
 /** Ring of the rectangle between two opposite corners. */

@@ -1,6 +1,7 @@
 import type { Board } from '#core/board/document.ts';
-import type { Point, Ring } from '#core/board/outline.ts';
-import { contains } from './footprint.ts';
+import type { Point } from '#core/board/outline.ts';
+import { polygonContains } from '#core/geometry/polygon.ts';
+import { distanceToEdge } from '#core/geometry/ring-checks.ts';
 import { type ObjectKey, objectKey } from './object-key.ts';
 import { type Box, boxOf, cornersOf, objectRings } from './object-rings.ts';
 
@@ -23,15 +24,16 @@ export function objectAt(board: Board, activeLayer: string, at: Point, reachMm: 
   ];
   const found = candidates.find((key) => isHit(board, key, at, reachMm));
   if (found) return found;
-  return distanceToRing(board.outline.points, at) <= reachMm ? objectKey('outline', '') : null;
+  return distanceToEdge(board.outline.points, at[0], at[1]) <= reachMm ? objectKey('outline', '') : null;
 }
 
 function isHit(board: Board, key: ObjectKey, at: Point, reachMm: number): boolean {
   const rings = objectRings(board, key);
-  if (key.startsWith('pour:')) return rings.reduce((inside, ring) => inside !== contains(ring, at), false);
+  if (key.startsWith('pour:'))
+    return rings.reduce((inside, ring) => inside !== polygonContains(ring, at[0], at[1]), false);
   const box = boxOf(rings);
   if (!box) return false;
-  if (rings.some((ring) => contains(ring, at))) return true;
+  if (rings.some((ring) => polygonContains(ring, at[0], at[1]))) return true;
   // Small things stay reachable at any zoom.
   const small = box.right - box.left < 2 * reachMm || box.top - box.bottom < 2 * reachMm;
   return (
@@ -65,15 +67,4 @@ export function objectsWithin(board: Board, keys: readonly ObjectKey[], box: Box
       own !== null && own.left >= box.left && own.right <= box.right && own.bottom >= box.bottom && own.top <= box.top
     );
   });
-}
-
-function distanceToRing(ring: Ring, [x, y]: Point): number {
-  let least = Infinity;
-  ring.forEach(([x1, y1], index) => {
-    const [x2, y2] = ring[(index + 1) % ring.length] ?? [x1, y1];
-    const length2 = (x2 - x1) ** 2 + (y2 - y1) ** 2;
-    const share = length2 === 0 ? 0 : Math.min(1, Math.max(0, ((x - x1) * (x2 - x1) + (y - y1) * (y2 - y1)) / length2));
-    least = Math.min(least, Math.hypot(x - x1 - share * (x2 - x1), y - y1 - share * (y2 - y1)));
-  });
-  return least;
 }

@@ -38,13 +38,16 @@ export function bandIndex(scale: HeatScale, temperatureC: number): number {
   return Math.min(scale.levels.length - 1, Math.max(0, index));
 }
 
+const palest = 251;
+const darkest = 40;
+
 /**
- * 256 colours, `#rrggbb`, cool to hot. Inferno (Smith and van der Walt, matplotlib 1.5) read from its light end:
+ * 212 colours, `#rrggbb`, cool to hot. Inferno (Smith and van der Walt, matplotlib 1.5) read from its light end:
  * perceptually uniform, ordered by lightness, kept in order by every kind of colour-vision deficiency.
- * The darkest tenth is left out so that lines and labels stay readable on it.
+ * Its darkest part is left out so that lines and labels stay readable on it.
  */
-export const heatColours: readonly string[] = Array.from({ length: 256 }, (_, index) =>
-  interpolateInferno(0.985 - (index / 255) * 0.83),
+export const heatColours: readonly string[] = Array.from({ length: palest - darkest + 1 }, (_, index) =>
+  interpolateInferno((palest - index + 0.5) / 256),
 );
 
 /** Removes the dust of binary fractions from multiples of the step. */

@@ -22,26 +22,40 @@ export function paddedGrid(field: HeatField, layerName: string): PaddedGrid | nu
   return { columns, rows, valuesC, xMm: centres(field.xEdgesMm), yMm: centres(field.yEdgesMm) };
 }
 
-/** Gives every empty cell the mean of its filled neighbours. */
+const beside = [
+  [1, 0],
+  [-1, 0],
+  [0, 1],
+  [0, -1],
+] as const;
+const across = [
+  [1, 1],
+  [1, -1],
+  [-1, 1],
+  [-1, -1],
+] as const;
+
+/** Gives every empty cell the mean of the filled cells beside it; of those across a corner only where it has no other. */
 function spread(valuesC: Float64Array, columns: number, rows: number): void {
   const before = valuesC.slice();
+  const meanOf = (column: number, row: number, steps: readonly (readonly [number, number])[]): number => {
+    let sum = 0;
+    let count = 0;
+    for (const [dx, dy] of steps) {
+      const [x, y] = [column + dx, row + dy];
+      if (x < 0 || y < 0 || x >= columns || y >= rows) continue;
+      const value = before[y * columns + x] ?? NaN;
+      if (!Number.isFinite(value)) continue;
+      sum += value;
+      count++;
+    }
+    return count > 0 ? sum / count : NaN;
+  };
   for (let row = 0; row < rows; row++) {
     for (let column = 0; column < columns; column++) {
       if (Number.isFinite(before[row * columns + column])) continue;
-      let sum = 0;
-      let count = 0;
-      for (let dy = -1; dy <= 1; dy++) {
-        for (let dx = -1; dx <= 1; dx++) {
-          const x = column + dx;
-          const y = row + dy;
-          if (x < 0 || y < 0 || x >= columns || y >= rows) continue;
-          const value = before[y * columns + x] ?? NaN;
-          if (!Number.isFinite(value)) continue;
-          sum += value;
-          count++;
-        }
-      }
-      if (count > 0) valuesC[row * columns + column] = sum / count;
+      const straight = meanOf(column, row, beside);
+      valuesC[row * columns + column] = Number.isFinite(straight) ? straight : meanOf(column, row, across);
     }
   }
 }

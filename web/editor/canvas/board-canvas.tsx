@@ -2,6 +2,7 @@ import { useEffect, useRef } from 'react';
 import { Stage } from 'react-konva/lib/ReactKonvaCore.js';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { fitBoard } from '../fit.ts';
+import { canvasId } from './canvas-id.ts';
 import { CopperPicture } from './copper-picture.tsx';
 import { HandPicture } from './hand-picture.tsx';
 import { PartsPicture } from './parts-picture.tsx';
@@ -20,12 +21,16 @@ export function BoardCanvas() {
   useEffect(() => {
     const box = element.current;
     if (!box) return;
+    let fittedCamera: unknown = null;
     const observer = new ResizeObserver(([entry]) => {
       if (!entry) return;
-      const first = store.getState().view.width === 0;
       const { width, height } = entry.contentRect;
+      const { view, camera } = store.getState();
       store.setState({ view: { width: Math.floor(width), height: Math.floor(height) } });
-      if (first) fitBoard(store);
+      // The picture stays fitted while the window changes, until somebody has moved it.
+      if (view.width !== 0 && camera !== fittedCamera) return;
+      fitBoard(store);
+      fittedCamera = store.getState().camera;
     });
     observer.observe(box);
     return () => observer.disconnect();
@@ -36,6 +41,7 @@ export function BoardCanvas() {
       ref={element}
       {...pointer}
       {...keys}
+      id={canvasId}
       role="application"
       aria-label="Board canvas"
       aria-describedby="canvas-help"

@@ -1,41 +1,19 @@
-import { formatQuantity } from '#core/format.ts';
 import { HeatLegend } from '#web/heat/heat-legend.tsx';
-import { temperatureAt, temperatureRange } from '#web/heat/temperature-at.ts';
-import { commands } from '../commands/command.ts';
+import { temperatureRange } from '#web/heat/temperature-at.ts';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
+import { gridSteps } from '../grid.ts';
+import { BarCheck, BarSelect } from '../page/bar-field.tsx';
 import { isCurrent } from '../solve/checks.ts';
 import { conditionScale, heatLimits } from './heat-picture.ts';
 import { activeCheck } from './use-heat-picture.ts';
 
-const zoomClass =
-  'inline-flex size-8 items-center justify-center border-l border-line-strong text-base first:border-l-0 hover:bg-copper-soft';
-
-/** Over the lower edge of the canvas: scale bar, coordinates with the temperature there, zoom. */
+/** Below the canvas: the scale bar, always there, and what the picture shows. */
 export function CanvasFooter() {
-  const store = useEditorStore();
   return (
-    <div className="pointer-events-none absolute inset-x-2 bottom-2 left-7 flex flex-wrap items-end justify-between gap-2">
+    <div className="flex flex-wrap items-center justify-between gap-x-5 gap-y-1 border-t border-line bg-panel px-3 py-1.5">
       <Legend />
-      <div className="flex flex-wrap items-end gap-2">
-        <Place />
-        <div className="pointer-events-auto flex rounded-sm border border-line-strong bg-panel">
-          <button type="button" className={zoomClass} aria-label="Zoom out" onClick={() => commands.zoomOut.run(store)}>
-            −
-          </button>
-          <button type="button" className={zoomClass} aria-label="Zoom in" onClick={() => commands.zoomIn.run(store)}>
-            +
-          </button>
-          <button
-            type="button"
-            className={`${zoomClass} w-auto px-2 text-sm`}
-            onClick={() => commands.fit.run(store)}
-            title="Fit the board (0)"
-          >
-            Fit
-          </button>
-        </div>
-      </div>
+      <ViewOptions />
     </div>
   );
 }
@@ -44,9 +22,12 @@ function Legend() {
   const check = useEditor(activeCheck);
   const layer = useEditor((state) => state.activeLayer);
   const board = useEditor(shownBoard);
-  if (!check) return <span />;
+  const busy = useEditor((state) => state.checks.busy);
+  if (!check) {
+    return <p className="text-sm text-ink-soft">{busy ? 'Calculating temperatures …' : 'No temperatures yet'}</p>;
+  }
   return (
-    <div className="w-[min(26rem,100%)] border border-line-strong bg-panel px-3 pt-1.5 pb-1">
+    <div className="max-w-[30rem] min-w-60 flex-1">
       <HeatLegend
         scale={conditionScale(check)}
         title={`Board, layer ${layer}${isCurrent(check, board) ? '' : ' (preview)'}`}
@@ -57,17 +38,37 @@ function Legend() {
   );
 }
 
-/** Coordinates of the pointer or the crosshair and the temperature there. */
-function Place() {
-  const at = useEditor((state) => state.crosshair ?? state.pointer);
-  const check = useEditor(activeCheck);
-  const layer = useEditor((state) => state.activeLayer);
-  if (!at) return null;
-  const temperature = check?.field ? temperatureAt(check.field, layer, at) : null;
+function ViewOptions() {
+  const store = useEditorStore();
+  const copper = useEditor((state) => state.board.stackup.copper);
+  const activeLayer = useEditor((state) => state.activeLayer);
+  const gridMm = useEditor((state) => state.gridMm);
+  const snapping = useEditor((state) => state.snapping);
+  const shown = useEditor((state) => state.shown);
   return (
-    <p className="border border-line-strong bg-panel px-2 py-1 text-xs">
-      x {formatQuantity(at[0], 'mm')}, y {formatQuantity(at[1], 'mm')}
-      {temperature === null ? null : ` · ${formatQuantity(temperature, '°C')} on ${layer}`}
-    </p>
+    <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
+      <BarSelect
+        label="Layer"
+        value={activeLayer}
+        onChange={(layer) => store.setState({ activeLayer: layer })}
+        options={copper.map(({ name }) => ({ value: name, label: name }))}
+      />
+      <BarSelect
+        label="Show"
+        value={shown}
+        onChange={(value) => store.setState({ shown: value })}
+        options={[
+          { value: 'heat', label: 'Heat' },
+          { value: 'copper', label: 'Copper' },
+        ]}
+      />
+      <BarSelect
+        label="Grid"
+        value={String(gridMm)}
+        onChange={(value) => store.setState({ gridMm: Number(value) })}
+        options={gridSteps.map((step) => ({ value: String(step), label: `${step} mm` }))}
+      />
+      <BarCheck label="Snap" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
+    </div>
   );
 }

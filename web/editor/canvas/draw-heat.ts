@@ -1,11 +1,15 @@
 import type { Board } from '#core/board/document.ts';
+import { polygonContains } from '#core/geometry/polygon.ts';
 import { formatGiven, formatQuantity } from '#core/format.ts';
 import type { HeatBand, Isotherm } from '#web/heat/heat-bands.ts';
 import { isothermLabels } from '#web/heat/isotherm-label.ts';
 import { toScreen } from '../camera.ts';
-import { contains } from '../footprint.ts';
+
 import { boardRings } from './draw-board.ts';
 import { type Sheet, drawText, strokePath, tracePath } from './sheet.ts';
+
+type Mm = readonly [number, number];
+type Outlined = Pick<Board, 'outline'>;
 
 /** Bands, isotherms and limits of one layer in one condition, made once per field and scale. */
 export type HeatPicture = {
@@ -15,7 +19,7 @@ export type HeatPicture = {
 };
 
 /** Filled bands, clipped to the board. */
-export function drawBands(sheet: Sheet, board: Pick<Board, 'outline'>, { bands }: HeatPicture): void {
+export function drawBands(sheet: Sheet, board: Outlined, { bands }: HeatPicture): void {
   const { pen } = sheet;
   pen.save();
   tracePath(sheet, boardRings(board));
@@ -30,9 +34,9 @@ export function drawBands(sheet: Sheet, board: Pick<Board, 'outline'>, { bands }
   pen.restore();
 }
 
-/** Isotherms with their temperatures; the limits as heavy dashed lines with their names. */
-export function drawIsotherms(sheet: Sheet, board: Pick<Board, 'outline'>, { lines, limits }: HeatPicture): void {
-  const { pen, camera, view } = sheet;
+/** Isotherms as thin lines, the limits as heavy dashed ones. */
+export function drawIsotherms(sheet: Sheet, board: Outlined, { lines, limits }: HeatPicture): void {
+  const { pen } = sheet;
   pen.save();
   tracePath(sheet, boardRings(board));
   pen.clip('evenodd');
@@ -48,11 +52,28 @@ export function drawIsotherms(sheet: Sheet, board: Pick<Board, 'outline'>, { lin
     strokePath(sheet, '#000000', 2, [8, 4]);
   }
   pen.restore();
-  const inside = (point: readonly [number, number]) =>
-    contains(board.outline.points, point) && !board.outline.cutouts.some((ring) => contains(ring, point));
+}
+
+/**
+ * Temperatures beside the isotherms, names beside the limits.
+ * @param occupied where no figure may stand, because a part or its own figures do
+ */
+export function drawIsothermLabels(
+  sheet: Sheet,
+  board: Outlined,
+  { lines, limits }: HeatPicture,
+  occupied: (point: Mm) => boolean,
+): void {
+  const { camera, view } = sheet;
+  const onBoard = (point: Mm) =>
+    polygonContains(board.outline.points, ...point) &&
+    !board.outline.cutouts.some((ring) => polygonContains(ring, ...point));
+  const free = (point: Mm) => onBoard(point) && !occupied(point);
+  // A limit is named in any case, if need be over a part.
+  const named = (point: Mm, line: Isotherm) => limits.some((limit) => limit.line === line) && onBoard(point);
   const apartMm = 46 / camera.pxPerMm;
-  const named = limits.map(({ line }) => line);
-  for (const { valueC, at } of isothermLabels([...named, ...lines], inside, apartMm)) {
+  const ordered = [...limits.map(({ line }) => line), ...lines];
+  for (const { valueC, at } of isothermLabels(ordered, free, apartMm, named)) {
     const limit = limits.find(({ line }) => line.valueC === valueC);
     const text = limit ? `${limit.label} ${formatQuantity(valueC, '°C', 0)}` : formatGiven(valueC);
     drawText(sheet, text, toScreen(camera, view, at), {

@@ -12,6 +12,26 @@ export type PartMark = { ref: string; temperatureC: number | null; verdict: Verd
 const sizePx = 13;
 const shapePx = 12;
 
+/** Where bodies and their plates stand, with a little room around them. */
+export function occupiedBy(sheet: Sheet, board: Board): (point: readonly [number, number]) => boolean {
+  const px = 1 / sheet.camera.pxPerMm;
+  const boxes = [
+    ...board.regulators.flatMap((regulator) => {
+      const box = boxOf([bodyRing(board, regulator) ?? [regulator.at]]);
+      if (!box) return [];
+      const middle = (box.left + box.right) / 2;
+      const half = Math.max((box.right - box.left) / 2 + 20 * px, 80 * px);
+      return [{ left: middle - half, right: middle + half, bottom: box.bottom - 14 * px, top: box.top + 36 * px }];
+    }),
+    ...board.sources.flatMap((source) => {
+      const reach = Math.max(...source.sizeMm) / 2 + 20 * px;
+      const [x, y] = source.at;
+      return [{ left: x - reach, right: x + reach, bottom: y - reach, top: y + reach }];
+    }),
+  ];
+  return ([x, y]) => boxes.some((box) => x >= box.left && x <= box.right && y >= box.bottom && y <= box.top);
+}
+
 /** Reference, junction temperature and verdict shape of every regulator on a plate above its body. */
 export function drawMarks(sheet: Sheet, board: Board, marks: ReadonlyMap<string, PartMark>, isPreview: boolean): void {
   const { pen, palette, camera, view } = sheet;

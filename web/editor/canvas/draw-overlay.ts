@@ -13,13 +13,13 @@ export function drawSelection(sheet: Sheet, board: Board, selection: readonly Ob
   for (const key of selection) {
     const rings = objectRings(board, key);
     const corners = cornersOf(board, key);
-    if (corners) strokeTwice(sheet, rings, sheet.palette.accent, 2.4);
+    if (corners) strokeTwice(sheet, rings, sheet.palette.ink, 2.2);
     else {
       const box = boxOf(rings);
       if (!box) continue;
       const pad = 4 / sheet.camera.pxPerMm;
       const frame = rectangleBetween([box.left - pad, box.bottom - pad], [box.right + pad, box.top + pad]);
-      strokeTwice(sheet, [frame], sheet.palette.accent, 2.2);
+      strokeTwice(sheet, [frame], sheet.palette.ink, 2);
     }
     if (corners && selection.length === 1) for (const corner of corners) drawHandle(sheet, corner);
   }
@@ -44,7 +44,7 @@ export function drawGesture(sheet: Sheet, gesture: Gesture): void {
   }
   if (gesture.phase === 'rectangle') {
     const { from, to } = gesture;
-    strokeTwice(sheet, [rectangleBetween(from, to)], palette.accent, 2);
+    strokeTwice(sheet, [rectangleBetween(from, to)], palette.ink, 2);
     const size = `${figure(Math.abs(to[0] - from[0]))} × ${formatQuantity(Math.abs(to[1] - from[1]), 'mm')}`;
     readout(sheet, size, to);
   }
@@ -75,7 +75,7 @@ export function drawGesture(sheet: Sheet, gesture: Gesture): void {
 
 /** Outline of a part that is about to be placed. */
 export function drawGhost(sheet: Sheet, at: Point, sizeMm: readonly number[]): void {
-  strokeTwice(sheet, [rectangleRing(at, sizeMm, 0)], sheet.palette.accent, 1.6, [4, 3]);
+  strokeTwice(sheet, [rectangleRing(at, sizeMm, 0)], sheet.palette.ink, 1.6, [4, 3]);
 }
 
 /** Cross at the place that Enter would use, with its coordinates. */
@@ -84,7 +84,7 @@ export function drawCrosshair(sheet: Sheet, at: Point): void {
   const [x, y] = toScreen(camera, view, at);
   for (const [colour, width] of [
     [palette.halo, 4],
-    [palette.accent, 1.6],
+    [palette.ink, 1.6],
   ] as const) {
     pen.beginPath();
     pen.moveTo(x - 18, y);
@@ -100,7 +100,7 @@ function openLine(sheet: Sheet, points: readonly Point[]): void {
   const { pen, camera, view, palette } = sheet;
   for (const [colour, width] of [
     [palette.halo, 4.5],
-    [palette.accent, 2],
+    [palette.ink, 2],
   ] as const) {
     pen.beginPath();
     points.forEach((point, index) => {
@@ -112,7 +112,7 @@ function openLine(sheet: Sheet, points: readonly Point[]): void {
   }
   const first = points[0];
   const last = points.at(-1);
-  if (points.length > 2 && first && last) strokeRings(sheet, [[last, first]], palette.accent, 1, [3, 4]);
+  if (points.length > 2 && first && last) strokeRings(sheet, [[last, first]], palette.ink, 1, [3, 4]);
 }
 
 function readout(sheet: Sheet, text: string, at: Point): void {

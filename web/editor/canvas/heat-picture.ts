@@ -30,10 +30,12 @@ export function heatPicture(check: ConditionCheck, layerName: string): HeatPictu
   if (!check.field || check.condition.status !== 'converged') return null;
   const scale = conditionScale(check);
   const { field } = check;
+  const limits = heatLimits(check.board, check.condition);
+  const plain = scale.levels.slice(1).filter((level) => limits.every(({ valueC }) => valueC !== level));
   return {
     bands: heatBands(field, layerName, scale),
-    lines: isotherms(field, layerName, scale.levels.slice(1)),
-    limits: heatLimits(check.board, check.condition).flatMap(({ label, valueC }) =>
+    lines: isotherms(field, layerName, plain),
+    limits: limits.flatMap(({ label, valueC }) =>
       isotherms(field, layerName, [valueC]).map((line) => ({ label, line })),
     ),
   };

@@ -3,10 +3,11 @@ import { useEditor } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
 import { isCurrent } from '../solve/checks.ts';
 import { drawBodies, drawLands } from './draw-board.ts';
-import { drawMarks } from './draw-marks.ts';
+import { drawIsothermLabels } from './draw-heat.ts';
+import { drawMarks, occupiedBy } from './draw-marks.ts';
 import { partMarks } from './part-marks.ts';
 import { PictureLayer } from './picture-layer.tsx';
-import { activeCheck } from './use-heat-picture.ts';
+import { activeCheck, useHeatPicture } from './use-heat-picture.ts';
 import { useThemePalette } from './use-theme-palette.ts';
 
 /** Lands, vias, bodies, heat sources, sinks, probes, and the temperature of every regulator. */
@@ -15,16 +16,17 @@ export function PartsPicture() {
   const board = useEditor(shownBoard);
   const camera = useEditor((state) => state.camera);
   const view = useEditor((state) => state.view);
-  const overHeat = useEditor((state) => state.shown === 'heat' && activeCheck(state)?.field !== null);
+  const picture = useHeatPicture();
   const check = useEditor(activeCheck);
   const draw = useMemo(
     () => (pen: CanvasRenderingContext2D) => {
       const sheet = { pen, camera, view, palette };
-      drawLands(sheet, board, overHeat);
+      drawLands(sheet, board, picture !== null);
       drawBodies(sheet, board);
+      if (picture) drawIsothermLabels(sheet, board, picture, occupiedBy(sheet, board));
       drawMarks(sheet, board, partMarks(check?.condition ?? null), !check || !isCurrent(check, board));
     },
-    [board, camera, view, palette, overHeat, check],
+    [board, camera, view, palette, picture, check],
   );
   return <PictureLayer draw={draw} />;
 }

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import type { RevisionView, SketchView } from '#core/contract/assemblies.ts';
 import { BoardCanvas } from '../canvas/board-canvas.tsx';
 import { CanvasFooter } from '../canvas/canvas-footer.tsx';
+import { ZoomCorner } from '../canvas/zoom-corner.tsx';
 import { KeysDialog } from '../commands/keys-dialog.tsx';
 import { useShortcuts } from '../commands/use-shortcuts.ts';
 import { EditorContext } from '../editor-context.ts';
@@ -36,11 +37,12 @@ export function Editor({ revision, sketch, userId }: Props) {
         <ConditionBar revisionId={revision.id} maySolve={revision.allowed.includes('solve')} flush={autosave.flush} />
         <div className="flex min-h-0 min-w-0 flex-1 flex-col lg:flex-row">
           <section aria-label="Board" className="relative flex min-h-72 min-w-0 flex-[3] flex-col lg:min-h-0">
-            <ToolOptions />
             <div className="relative min-h-0 flex-1">
               <BoardCanvas />
-              <CanvasFooter />
+              <ToolOptions />
+              <ZoomCorner />
             </div>
+            <CanvasFooter />
           </section>
           <SidePanel />
         </div>

@@ -1,21 +1,24 @@
-import { PartPicker } from '../parts/part-picker.tsx';
+import type { ReactNode } from 'react';
 import { useEditor, useEditorStore } from '../editor-context.ts';
-import { gridSteps } from '../grid.ts';
-import { toolOf } from '../tools/tool-of.ts';
+import { PartPicker } from '../parts/part-picker.tsx';
 import { type ToolSettings, drawsShape, toolWords } from '../tools/tool-name.ts';
-import { BarCheck, BarSelect } from './bar-field.tsx';
+import { toolOf } from '../tools/tool-of.ts';
+import { BarSelect } from './bar-field.tsx';
 import { NetField } from './net-field.tsx';
 
-/** What the chosen tool does and starts from; layer, grid and picture at the right. */
+/** Over the upper edge of the canvas: what the chosen tool does and what its next object starts from. */
 export function ToolOptions() {
   const store = useEditorStore();
   const tool = useEditor((state) => state.tool);
   const settings = useEditor((state) => state.toolSettings);
-  const isDrawing = useEditor((state) => state.gesture.phase === 'polygon' && state.gesture.points.length >= 3);
+  const isCarrying = useEditor(({ gesture }) => 'held' in gesture && !gesture.held && gesture.phase !== 'rectangle');
+  const isClosable = useEditor((state) => state.gesture.phase === 'polygon' && state.gesture.points.length >= 3);
   const change = (patch: Partial<ToolSettings>) =>
     store.setState(({ toolSettings }) => ({ toolSettings: { ...toolSettings, ...patch } }));
+  if (tool === 'select' && isCarrying) return <Plate>Click or press Enter to put it down, Escape to leave it.</Plate>;
+  if (tool === 'select' || tool === 'hand') return null;
   return (
-    <div className="flex min-h-11 flex-wrap items-center gap-x-4 gap-y-1 border-b border-line bg-paper px-2 py-1 sm:px-4">
+    <Plate>
       {drawsShape(tool) ? (
         <BarSelect
           label={toolWords[tool].label}
@@ -42,54 +45,24 @@ export function ToolOptions() {
           ]}
         />
       ) : null}
-      {isDrawing ? (
+      <span className="text-ink-soft">{toolWords[tool].hint}</span>
+      {isClosable ? (
         <button
           type="button"
-          className="min-h-8 rounded-sm border border-line-strong bg-panel px-2 text-sm font-semibold hover:border-ink"
+          className="min-h-8 rounded-sm border border-line-strong bg-panel px-2 font-semibold hover:border-ink"
           onClick={() => toolOf(store.getState()).finish?.(store)}
         >
           Close the polygon
         </button>
       ) : null}
-      <p className="hidden min-w-0 flex-1 truncate text-sm text-ink-soft xl:block" title={toolWords[tool].hint}>
-        {toolWords[tool].hint}
-      </p>
-      <ViewOptions />
-    </div>
+    </Plate>
   );
 }
 
-function ViewOptions() {
-  const store = useEditorStore();
-  const copper = useEditor((state) => state.board.stackup.copper);
-  const activeLayer = useEditor((state) => state.activeLayer);
-  const gridMm = useEditor((state) => state.gridMm);
-  const snapping = useEditor((state) => state.snapping);
-  const shown = useEditor((state) => state.shown);
+function Plate({ children }: { children: ReactNode }) {
   return (
-    <div className="ml-auto flex flex-wrap items-center gap-x-4 gap-y-1">
-      <BarSelect
-        label="Layer"
-        value={activeLayer}
-        onChange={(layer) => store.setState({ activeLayer: layer })}
-        options={copper.map(({ name }) => ({ value: name, label: name }))}
-      />
-      <BarSelect
-        label="Show"
-        value={shown}
-        onChange={(value) => store.setState({ shown: value })}
-        options={[
-          { value: 'heat', label: 'Heat' },
-          { value: 'copper', label: 'Copper' },
-        ]}
-      />
-      <BarSelect
-        label="Grid"
-        value={String(gridMm)}
-        onChange={(value) => store.setState({ gridMm: Number(value) })}
-        options={gridSteps.map((step) => ({ value: String(step), label: `${step} mm` }))}
-      />
-      <BarCheck label="Snap" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
+    <div className="absolute top-7 right-2 left-8 pointer-events-none flex w-fit flex-wrap items-center gap-x-4 gap-y-1 border border-line-strong bg-panel px-3 py-1.5 text-sm [&_button]:pointer-events-auto [&_input]:pointer-events-auto [&_select]:pointer-events-auto">
+      {children}
     </div>
   );
 }

@@ -44,12 +44,19 @@ export function startAutosave(dependencies: AutosaveDependencies): Autosave {
 
   const unsubscribe = store.subscribe((state, before) => {
     if (state.board === before.board || state.readOnly !== null) return;
-    if (!isDirty(state)) return void drafts.remove();
+    if (!isDirty(state)) return backAtSaved();
     void drafts.write({ baseVersion: state.savedVersion, changedAt: now(), board: state.board });
     if (state.save.kind === 'conflict') return;
     if (state.save.kind !== 'saving') store.setState({ save: { kind: 'waiting' } });
     later(debounceMs);
   });
+
+  /** Undo has led back to what the server has. */
+  function backAtSaved(): void {
+    void drafts.remove();
+    const { save, savedAt } = store.getState();
+    if (save.kind !== 'saving' && save.kind !== 'conflict') store.setState({ save: { kind: 'saved', at: savedAt } });
+  }
 
   async function flush(): Promise<void> {
     clearTimeout(timer);
@@ -69,7 +76,8 @@ export function startAutosave(dependencies: AutosaveDependencies): Autosave {
     store.setState({ save: { kind: 'saving' } });
     try {
       const saved = await send(board, savedVersion);
-      store.setState({ savedBoard: board, savedVersion: saved.version, save: { kind: 'saved', at: saved.savedAt } });
+      const { version, savedAt } = saved;
+      store.setState({ savedBoard: board, savedVersion: version, savedAt, save: { kind: 'saved', at: savedAt } });
       onSaved?.(saved);
       if (isDirty(store.getState())) {
         store.setState({ save: { kind: 'waiting' } });

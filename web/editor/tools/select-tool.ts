@@ -111,18 +111,22 @@ export function pickUp(store: EditorStore): void {
 
 /** The reference point of what is moved lands on the grid, so that a part lies where its figures are round. */
 function carry(store: EditorStore, gesture: Extract<Gesture, { phase: 'moving' }>, input: PointerInput): void {
-  const { board } = store.getState();
+  const { board, live: before } = store.getState();
   const [first] = gesture.keys;
   const home = (first && positionOf(board, first)) ?? gesture.from;
   const exact: Point = [input.at[0] - gesture.from[0], input.at[1] - gesture.from[1]];
   const by = input.settle([home[0] + exact[0], home[1] + exact[1]]);
   const shift: Point = [tidyMm(by[0] - home[0]), tidyMm(by[1] - home[1])];
+  // Within one step of the grid nothing has changed; a new board would be calculated for nothing.
+  if (before && shift[0] === gesture.by[0] && shift[1] === gesture.by[1]) return;
   const live = shift[0] === 0 && shift[1] === 0 ? board : moveObjects(board, gesture.keys, shift);
   store.setState({ gesture: { ...gesture, by: shift }, live });
 }
 
 function dragCorner(store: EditorStore, key: ObjectKey, index: number, input: PointerInput, held: boolean): void {
-  const { board } = store.getState();
+  const { board, gesture, live } = store.getState();
+  const [x, y] = input.snapped;
+  if (live && gesture.phase === 'moving-corner' && gesture.to[0] === x && gesture.to[1] === y) return;
   store.setState({
     gesture: { phase: 'moving-corner', key, index, to: input.snapped, held },
     live: moveCorner(board, key, index, input.snapped),
