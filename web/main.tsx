@@ -1,4 +1,4 @@
-import { config } from 'zod/v4/core';
+import './schema-settings.ts';
 import { QueryClientProvider } from '@tanstack/react-query';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
@@ -8,8 +8,6 @@ import { routes } from './routes.tsx';
 import { queryClient } from './server/query-client.ts';
 import './theme.css';
 
-// The page's content policy refuses code made from text, so the schemas must not try.
-config({ jitless: true });
 startTheme();
 
 const root = document.getElementById('root');

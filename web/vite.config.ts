@@ -16,6 +16,8 @@ export default defineConfig(({ mode }) => ({
       output: {
         codeSplitting: {
           groups: [
+            // With the settings, so that they run before any schema of another chunk is made.
+            { name: 'schemas', test: /node_modules[\\/]zod[\\/]|[\\/]web[\\/]schema-settings\.ts$/, priority: 30 },
             {
               name: 'react',
               test: /node_modules[\\/](react|react-dom|scheduler|react-router|react-router-dom)[\\/]/,
