@@ -1,7 +1,7 @@
 import type { Caution } from '#core/result/result.ts';
 import { burnTime } from './burn-threshold.ts';
 import type { FindingContext } from './finding-context.ts';
-import { fixed } from './fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** Hazards to people and property; never a mere exceedance. The standing caution comes with every result. */
 export function cautionsOf(context: FindingContext): Caution[] {
@@ -34,9 +34,9 @@ function hotSurfaces({ board, conditions }: FindingContext): Caution[] {
     if (!metal && !plastic) return [];
     const parts = [
       metal &&
-        `bare metal at ${fixed(hottest.metalC, 0)} °C burns skin within ${metal.time} (threshold ${metal.thresholdC} °C)`,
+        `bare metal at ${formatNumber(hottest.metalC, 0)} °C burns skin within ${metal.time} (threshold ${metal.thresholdC} °C)`,
       plastic &&
-        `the case top at ${fixed(hottest.caseC, 0)} °C within ${plastic.time} (plastic, ${plastic.thresholdC} °C)`,
+        `the case top at ${formatNumber(hottest.caseC, 0)} °C within ${plastic.time} (plastic, ${plastic.thresholdC} °C)`,
     ].filter(Boolean);
     return [
       {
@@ -57,7 +57,7 @@ function hotLaminate({ board, conditions }: FindingContext): Caution[] {
             kind: 'laminate' as const,
             ref: null,
             condition: condition.name,
-            message: `Laminate at ${fixed(result.board.maxC, 0)} °C, above its maximum operating temperature of ${fixed(board.stackup.maxOperatingC, 0)} °C: it may delaminate, char and burn.`,
+            message: `Laminate at ${formatNumber(result.board.maxC, 0)} °C, above its maximum operating temperature of ${formatNumber(board.stackup.maxOperatingC, 0)} °C: it may delaminate, char and burn.`,
           },
         ]
       : [],
@@ -72,7 +72,7 @@ function hotNeighbours({ conditions }: FindingContext): Caution[] {
         kind: 'neighbour' as const,
         ref: source.ref,
         condition: condition.name,
-        message: `${source.ref} reaches ${fixed(source.temperatureC ?? NaN, 0)} °C, above its limit of ${fixed(source.limitC ?? NaN, 0)} °C: it may fail, vent or burn.`,
+        message: `${source.ref} reaches ${formatNumber(source.temperatureC ?? NaN, 0)} °C, above its limit of ${formatNumber(source.limitC ?? NaN, 0)} °C: it may fail, vent or burn.`,
       })),
   );
 }

@@ -1,5 +1,5 @@
 import type { FindingRule } from '../finding-context.ts';
-import { fixed } from '../fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** Input voltage or output current above what the maker allows at all. */
 export const aboveRating: FindingRule = ({ board, conditions }) =>
@@ -15,7 +15,7 @@ export const aboveRating: FindingRule = ({ board, conditions }) =>
         found.push({
           ...place,
           rule: 'input-above-maximum',
-          message: `${regulator.ref} gets ${fixed(point.inputV, 2)} V; ${part.name} allows ${fixed(part.inputMaxV, 2)} V.`,
+          message: `${regulator.ref} gets ${formatNumber(point.inputV, 2)} V; ${part.name} allows ${formatNumber(part.inputMaxV, 2)} V.`,
           remedy: 'Lower the feed or use a part for a higher input.',
         });
       }
@@ -23,7 +23,7 @@ export const aboveRating: FindingRule = ({ board, conditions }) =>
         found.push({
           ...place,
           rule: 'output-above-maximum',
-          message: `${regulator.ref} carries ${fixed(point.outputA, 3)} A; ${part.name} allows ${fixed(part.outputMaxA, 3)} A.`,
+          message: `${regulator.ref} carries ${formatNumber(point.outputA, 3)} A; ${part.name} allows ${formatNumber(part.outputMaxA, 3)} A.`,
           remedy: 'Lower the load or use a part for more current.',
         });
       }

@@ -1,5 +1,5 @@
 import type { FindingRule } from '../finding-context.ts';
-import { fixed } from '../fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** Least distance of a junction limit from the shutdown threshold, K (common practice: hysteresis and spread of the threshold). */
 const shutdownDistanceK = 25;
@@ -38,7 +38,7 @@ export const junctionCriteria: FindingRule = ({ board }) => {
         severity: 'stop' as const,
         ref: regulator.ref,
         condition: null,
-        message: `The junction limit of ${regulator.ref}, ${fixed(limit, 0)} °C, lies less than ${shutdownDistanceK} K below its thermal shutdown at ${fixed(part.shutdownC, 0)} °C.`,
+        message: `The junction limit of ${regulator.ref}, ${formatNumber(limit, 0)} °C, lies less than ${shutdownDistanceK} K below its thermal shutdown at ${formatNumber(part.shutdownC, 0)} °C.`,
         remedy: 'Lower the limit; a shutdown protects the die and is no operating limit.',
       },
     ];

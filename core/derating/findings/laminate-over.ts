@@ -1,5 +1,5 @@
 import type { FindingRule } from '../finding-context.ts';
-import { fixed } from '../fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** The board itself above the laminate's maximum operating temperature. */
 export const laminateOver: FindingRule = ({ board, conditions }) =>
@@ -13,7 +13,7 @@ export const laminateOver: FindingRule = ({ board, conditions }) =>
         severity: 'warn' as const,
         ref: null,
         condition: condition.name,
-        message: `The board reaches ${fixed(result.board.maxC, 1)} °C at ${fixed(x, 1)}, ${fixed(y, 1)} mm; its laminate is rated ${fixed(limit, 0)} °C.`,
+        message: `The board reaches ${formatNumber(result.board.maxC, 1)} °C at ${formatNumber(x, 1)}, ${formatNumber(y, 1)} mm; its laminate is rated ${formatNumber(limit, 0)} °C.`,
         remedy: 'Spread the heat or use a laminate with a higher maximum operating temperature.',
       },
     ];

@@ -1,5 +1,5 @@
 import type { FindingRule } from '../finding-context.ts';
-import { fixed } from '../fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** The lowest input does not carry the highest output at this load: the part starves before it overheats. */
 export const noHeadroom: FindingRule = ({ board, conditions }) =>
@@ -16,8 +16,8 @@ export const noHeadroom: FindingRule = ({ board, conditions }) =>
           ref: point.ref,
           condition: condition.name,
           message: short
-            ? `${point.ref} lacks ${fixed(-point.headroomV!, 2)} V of headroom at its lowest input and ${fixed(point.outputA ?? 0, 3)} A.`
-            : `${point.ref} does not regulate at ${fixed(point.inputV ?? 0, 2)} V and ${fixed(point.outputA ?? 0, 3)} A; its output follows the input.`,
+            ? `${point.ref} lacks ${formatNumber(-point.headroomV!, 2)} V of headroom at its lowest input and ${formatNumber(point.outputA ?? 0, 3)} A.`
+            : `${point.ref} does not regulate at ${formatNumber(point.inputV ?? 0, 2)} V and ${formatNumber(point.outputA ?? 0, 3)} A; its output follows the input.`,
           remedy: dropper
             ? 'Lower the dropper, raise the feed or use a part with less dropout.'
             : 'Raise the feed or use a part with less dropout.',

@@ -3,7 +3,7 @@ import { placedLands } from '#core/thermal/land-placement.ts';
 import { viaCentres } from '#core/thermal/via-conductance.ts';
 import type { Finding } from '#core/result/result.ts';
 import type { FindingRule } from '../finding-context.ts';
-import { fixed } from '../fixed.ts';
+import { formatNumber } from '#core/format.ts';
 
 /** Largest open hole that a solder land bears before it drinks the solder, mm (common practice). */
 const openHoleMm = 0.3;
@@ -42,7 +42,7 @@ export const viaUse: FindingRule = ({ board }) => {
         severity: 'warn',
         ref: via.id,
         condition: null,
-        message: `Via field ${via.id} has open holes of ${fixed(via.drillMm, 2)} mm in the land “${open.land.name}” of ${open.ref}; they draw solder from it.`,
+        message: `Via field ${via.id} has open holes of ${formatNumber(via.drillMm, 2)} mm in the land “${open.land.name}” of ${open.ref}; they draw solder from it.`,
         remedy: `Drill ${openHoleMm} mm or less, or have the holes filled, and tell the fabricator.`,
       });
     }
