@@ -11,7 +11,7 @@ import { activeCheck } from './use-heat-picture.ts';
 /** Below the canvas: the scale bar, always there, and what the picture shows. */
 export function CanvasFooter() {
   return (
-    <div className="flex flex-wrap items-center justify-between gap-x-5 gap-y-1 border-t border-line bg-panel px-3 py-1.5">
+    <div className="flex min-h-20 flex-wrap items-center justify-between gap-x-5 gap-y-1 border-t border-line bg-panel px-3 py-1.5">
       <Legend />
       <ViewOptions />
     </div>

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import type { Board, BoardDocument } from '#core/board/document.ts';
 import type { RevisionView, SketchView } from '#core/contract/assemblies.ts';
 import { BoardCanvas } from '../canvas/board-canvas.tsx';
 import { CanvasFooter } from '../canvas/canvas-footer.tsx';
@@ -18,8 +19,12 @@ import { ToolOptions } from './tool-options.tsx';
 import { useReadOnly } from './use-read-only.ts';
 import { useSearchSync } from './use-search-sync.ts';
 
-type Props = { revision: RevisionView; sketch: SketchView & { board: Board }; userId: string };
-type Board = Parameters<typeof createEditorStore>[0]['board'];
+type Props = {
+  revision: RevisionView;
+  /** `board` with every default filled in, `written` as it is stored. */
+  sketch: SketchView & { board: Board; written: BoardDocument };
+  userId: string;
+};
 
 /** The sketch page: bars above, canvas in the middle, panels to the right (below on a narrow window), ladders at the foot. */
 export function Editor({ revision, sketch, userId }: Props) {

@@ -1,15 +1,17 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo, useRef } from 'react';
-import type { Board } from '#core/board/document.ts';
+import { asWritten } from '#core/board/as-written.ts';
+import type { Board, BoardDocument } from '#core/board/document.ts';
 import type { SketchView } from '#core/contract/assemblies.ts';
 import { resultQuery, revisionQuery, sketchQuery, sketchVersionsQuery } from '#web/revision/revision-queries.ts';
-import { call } from '#web/server/call.ts';
+import { call, callWritten } from '#web/server/call.ts';
 import { type EditorStore, isDirty } from '../editor-store.ts';
 import { type Autosave, startAutosave } from './autosave.ts';
 import { draftStore } from './draft-store.ts';
 import { restoreDraft } from './restore-draft.ts';
 
-type Place = { revisionId: string; userId: string; sketch: SketchView & { board: Board } };
+type Sketch = SketchView & { board: Board; written: BoardDocument };
+type Place = { revisionId: string; userId: string; sketch: Sketch };
 
 /** Saves while the page is open, brings back what a crash left unsaved, and guards against closing too early. */
 export function useAutosave(store: EditorStore, { revisionId, userId, sketch }: Place): Omit<Autosave, 'stop'> {
@@ -20,12 +22,23 @@ export function useAutosave(store: EditorStore, { revisionId, userId, sketch }: 
   useEffect(() => {
     const drafts = draftStore(userId, revisionId);
     const sketchKey = sketchQuery(revisionId).queryKey;
+    /** The document as the server has it: what it leaves to defaults stays left to them. */
+    let { written } = opened.current;
     const autosave = startAutosave({
       store,
       drafts,
       now: () => new Date().toISOString(),
-      send: (board, overVersion) => call('saveSketch', { params: { revisionId }, body: board, ifMatch: overVersion }),
-      load: () => call('readSketch', { params: { revisionId } }),
+      async send(board, overVersion) {
+        const body = asWritten(board, written);
+        const saved = await call('saveSketch', { params: { revisionId }, body, ifMatch: overVersion });
+        written = body;
+        return saved;
+      },
+      async load() {
+        const theirs = await callWritten('readSketch', { params: { revisionId } });
+        written = theirs.written.board;
+        return theirs.answer;
+      },
       onSaved: () => {
         // The editor holds the newest sketch itself; what follows from it must be asked for again.
         for (const { queryKey } of [

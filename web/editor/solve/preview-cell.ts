@@ -1,7 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 
 /** Unknowns of a preview, so that its answer comes within a tenth of a second. */
-const unknowns = 9000;
+const unknowns = 6000;
 const finestMm = 1;
 
 /** Cell of the preview while something is being moved, mm. */

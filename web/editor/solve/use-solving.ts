@@ -6,15 +6,18 @@ import { verdictWords } from '#web/ui/verdict-words.ts';
 import { activeCheck } from '../canvas/use-heat-picture.ts';
 import type { EditorStore } from '../editor-store.ts';
 import { type ConditionCheck, isCurrent } from './checks.ts';
-import { startSolving } from './solve-loop.ts';
+import { type Solve, startSolving } from './solve-loop.ts';
 import type { SolveWorker } from './solve.worker.ts';
 
-/** Runs the calculation in a worker as long as the page is open, and says the settled results aloud. */
+/** Runs the calculation in workers as long as the page is open, and says the settled results aloud. */
 export function useSolving(store: EditorStore): void {
   useEffect(() => {
-    const worker = new Worker(new URL('./solve.worker.ts', import.meta.url), { type: 'module' });
-    const remote = Comlink.wrap<SolveWorker>(worker);
-    const stop = startSolving(store, (board, condition, cellMm) => remote.solve(board, condition, cellMm));
+    const workers = { preview: startWorker(), settled: startWorker() };
+    const solveIn = (worker: Worker): Solve => {
+      const remote = Comlink.wrap<SolveWorker>(worker);
+      return (board, condition, cellMm) => remote.solve(board, condition, cellMm);
+    };
+    const stop = startSolving(store, { preview: solveIn(workers.preview), settled: solveIn(workers.settled) });
     const silence = store.subscribe((state, before) => {
       const check = activeCheck(state);
       if (check && check !== activeCheck(before) && isCurrent(check, state.board)) announce(spoken(check));
@@ -22,9 +25,14 @@ export function useSolving(store: EditorStore): void {
     return () => {
       stop();
       silence();
-      worker.terminate();
+      workers.preview.terminate();
+      workers.settled.terminate();
     };
   }, [store]);
+}
+
+function startWorker(): Worker {
+  return new Worker(new URL('./solve.worker.ts', import.meta.url), { type: 'module' });
 }
 
 /** Junction temperatures and verdicts of a condition in one sentence. */
