@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { mkdirSync, readdirSync, readFileSync, statSync, writeFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
-import { localFolder, projectFolder } from './local-folder.js';
+import { projectFolder, stampFolder } from './local-folder.js';
 
 /** Hash of the contents of files and folders of the project. */
 function contentHash(paths) {
@@ -25,7 +25,7 @@ function contentHash(paths) {
  * @param {() => Promise<void> | void} act
  */
 export async function whenChanged(name, paths, isThere, act) {
-  const file = join(localFolder, 'stamps', name);
+  const file = join(stampFolder, name);
   const hash = contentHash(paths);
   let before = '';
   try {
