@@ -34,7 +34,7 @@ export function ChangePassword({ email }: { email: string }) {
         Change the password
       </h2>
       <form noValidate onSubmit={submit} className="mt-4 flex flex-col gap-5 border-t border-line pt-4">
-        {change.error ? <ProblemNotice error={change.error} /> : null}
+        {change.error ? <ProblemNotice error={change.error} fields={['currentPassword', 'newPassword']} /> : null}
         <input type="hidden" name="username" autoComplete="username" value={email} />
         <PasswordField
           label="Present password"

@@ -50,7 +50,7 @@ export function ChangeAssembly({ assembly, onClose }: { assembly: AssemblyView; 
       }
     >
       <form id={formId} noValidate onSubmit={submit} className="flex flex-col gap-5">
-        {change.error ? <ProblemNotice error={change.error} /> : null}
+        {change.error ? <ProblemNotice error={change.error} fields={['number', 'title']} /> : null}
         <TextField
           label="Number"
           autoComplete="off"

@@ -52,7 +52,7 @@ export function CreateAssembly({ onClose }: { onClose: () => void }) {
     >
       <form id={formId} noValidate onSubmit={submit} className="flex flex-col gap-5">
         <p className="text-ink-soft">It starts as revision A with a blank board.</p>
-        {create.error ? <ProblemNotice error={create.error} /> : null}
+        {create.error ? <ProblemNotice error={create.error} fields={['number', 'title']} /> : null}
         <TextField
           label="Number"
           hint="The drawing or part number of the assembly; one of its kind in the team."

@@ -34,7 +34,8 @@ export type Fact = { name: string; before?: string; value: string };
 
 /** Facts of an event as lines; `{ from, to }` becomes one line with the old and the new value. */
 export function factLines(facts: Record<string, unknown>): Fact[] {
-  return Object.entries(facts).map(([key, value]) => {
+  const given = Object.entries(facts).filter(([, value]) => value !== null && value !== undefined);
+  return given.map(([key, value]) => {
     const name = factWords(key);
     if (typeof value === 'object' && value !== null && 'from' in value && 'to' in value) {
       return { name, before: factValue(value.from), value: factValue(value.to) };

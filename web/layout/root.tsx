@@ -20,6 +20,7 @@ export function Root() {
       <Toaster
         position="bottom-right"
         closeButton
+        style={{ fontFamily: 'inherit' }}
         duration={6000}
         toastOptions={{
           unstyled: true,

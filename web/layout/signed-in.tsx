@@ -26,7 +26,7 @@ export function SignedIn() {
     <div className={fill ? 'flex h-dvh min-h-[36rem] flex-col' : 'flex min-h-dvh flex-col'}>
       <Header session={session} />
       <OfflineNotice />
-      <SessionEnding session={session} />
+      <SessionEnding key={session.expiresAt} session={session} />
       <main id="content" tabIndex={-1} className="flex min-h-0 min-w-0 flex-1 flex-col outline-none">
         <Outlet />
       </main>

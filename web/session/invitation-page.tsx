@@ -65,7 +65,7 @@ function AcceptForm({ token, invitedAs }: { token: string; invitedAs: InvitedAs 
         You are invited as {invitedAs.roles.map((role) => roleNames[role].toLowerCase()).join(', ')}. Your sign-in is{' '}
         <strong className="break-all">{invitedAs.email}</strong>.
       </p>
-      {accept.error ? <ProblemNotice error={accept.error} /> : null}
+      {accept.error ? <ProblemNotice error={accept.error} fields={['name', 'password']} /> : null}
       <input type="hidden" name="username" autoComplete="username" value={invitedAs.email} />
       <TextField
         label="Your name"

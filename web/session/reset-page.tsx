@@ -28,7 +28,7 @@ export function Component() {
   return (
     <PlainPage title="Set a new password">
       <form noValidate onSubmit={submit} className="flex flex-col gap-5">
-        {complete.error ? <ProblemNotice error={complete.error} /> : null}
+        {complete.error ? <ProblemNotice error={complete.error} fields={['password']} /> : null}
         <PasswordField
           label="New password"
           hint="At least 12 characters; a few words in a row are fine. Every open session ends."

@@ -10,7 +10,7 @@ const warnBeforeMs = 10 * 60_000;
 const longestWaitMs = 2 ** 31 - 1;
 const clock = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit' });
 
-/** Says ten minutes ahead when the session will end, with a way to go on without leaving the page. */
+/** Says ten minutes ahead when the session will end, with a way to go on without leaving the page. One per session. */
 export function SessionEnding({ session }: { session: SessionView }) {
   const client = useQueryClient();
   const end = Date.parse(session.expiresAt);
@@ -18,7 +18,6 @@ export function SessionEnding({ session }: { session: SessionView }) {
   const [renewing, setRenewing] = useState(false);
   useEffect(() => {
     const left = end - Date.now();
-    setNear(left <= warnBeforeMs);
     const warn = setTimeout(() => setNear(true), Math.min(Math.max(left - warnBeforeMs, 0), longestWaitMs));
     // A second late, so that the server has ended it for certain when it is asked.
     const finish = setTimeout(

@@ -53,7 +53,7 @@ export function ChangeMember({ member, onClose }: { member: MemberView; onClose:
       }
     >
       <form id={formId} noValidate onSubmit={submit} className="flex flex-col gap-5">
-        {change.error ? <ProblemNotice error={change.error} /> : null}
+        {change.error ? <ProblemNotice error={change.error} fields={['name', 'roles']} /> : null}
         <TextField
           label="Name"
           autoComplete="off"

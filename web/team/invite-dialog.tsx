@@ -62,7 +62,7 @@ export function InviteDialog({ onClose }: { onClose: () => void }) {
         onSubmit={(event) => void form.handleSubmit((body) => invite.mutate(body))(event)}
         className="flex flex-col gap-5"
       >
-        {invite.error ? <ProblemNotice error={invite.error} /> : null}
+        {invite.error ? <ProblemNotice error={invite.error} fields={['name', 'email']} /> : null}
         <TextField label="Name" autoComplete="off" {...form.register('name')} error={errorAt('name')} />
         <TextField
           label="E-mail address"

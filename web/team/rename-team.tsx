@@ -50,7 +50,7 @@ export function RenameTeam({ name: present, onClose }: { name: string; onClose: 
       }
     >
       <form id={formId} noValidate onSubmit={submit} className="flex flex-col gap-5">
-        {rename.error ? <ProblemNotice error={rename.error} /> : null}
+        {rename.error ? <ProblemNotice error={rename.error} fields={['name']} /> : null}
         <TextField
           label="Name"
           autoComplete="off"

@@ -2,8 +2,15 @@ import { ProblemError } from '#web/server/problem-error.ts';
 import { Button } from './button.tsx';
 import { Notice } from './notice.tsx';
 
+type Props = {
+  error: Error;
+  retry?: () => void;
+  /** Paths whose faults the form shows at their fields, so that they are not said twice. */
+  fields?: readonly string[];
+};
+
 /** What went wrong in the server's own words, every fault and reason listed, with a way to try again. */
-export function ProblemNotice({ error, retry }: { error: Error; retry?: () => void }) {
+export function ProblemNotice({ error, retry, fields = [] }: Props) {
   // What is not there, or not allowed, is so the second time too.
   const final = error instanceof ProblemError && (error.status === 403 || error.status === 404);
   const action =
@@ -19,7 +26,8 @@ export function ProblemNotice({ error, retry }: { error: Error; retry?: () => vo
       </Notice>
     );
   }
-  const { title, detail, faults = [], reasons = [], instance } = error.problem;
+  const { title, detail, reasons = [], instance } = error.problem;
+  const faults = error.problem.faults?.filter(({ path }) => !fields.includes(path)) ?? [];
   return (
     <Notice tone={error.code === 'offline' ? 'warn' : 'stop'} alert title={title} action={action}>
       {detail !== title ? <p>{detail}</p> : null}

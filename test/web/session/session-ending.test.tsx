@@ -26,9 +26,13 @@ test('session – ten minutes before its end – says so and offers to stay sign
       <SessionEnding session={session} />
     </QueryClientProvider>,
   );
-  act(() => vi.advanceTimersByTime(19 * minute));
+  act(() => {
+    vi.advanceTimersByTime(19 * minute);
+  });
   expect(screen.queryByRole('button', { name: 'Stay signed in' })).not.toBeInTheDocument();
-  act(() => vi.advanceTimersByTime(1 * minute));
+  act(() => {
+    vi.advanceTimersByTime(1 * minute);
+  });
   expect(screen.getByRole('status')).toHaveTextContent(/Your session ends at/);
   expect(screen.getByRole('button', { name: 'Stay signed in' })).toBeInTheDocument();
 });

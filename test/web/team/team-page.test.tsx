@@ -22,7 +22,7 @@ afterEach(() => {
 
 function open(allowed: SessionView['allowed']) {
   const fetched = vi.fn<typeof fetch>((address, init) => {
-    const path = String(address).replace('/api/v1', '');
+    const path = typeof address === 'string' ? address.replace('/api/v1', '') : '';
     if (init?.method === 'DELETE') return Promise.resolve(new Response(null, { status: 204 }));
     if (path === '/team') return Promise.resolve(Response.json({ id: ids[0], name: 'Drive Electronics' }));
     return Promise.resolve(Response.json({ items: path === '/members' ? members : [] }));
