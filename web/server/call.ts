@@ -97,7 +97,7 @@ export function addressOf(
   const filled = path.replace(/\{(\w+)\}/g, (_, key: string) => encodeURIComponent(String(params[key])));
   const search = new URLSearchParams();
   for (const [key, value] of Object.entries(query)) {
-    if (value !== undefined && value !== null && value !== '') search.set(key, String(value));
+    if (typeof value === 'number' || (typeof value === 'string' && value !== '')) search.set(key, String(value));
   }
   const text = search.toString();
   return `/api/v1${filled}${text ? `?${text}` : ''}`;
