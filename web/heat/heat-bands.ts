@@ -34,7 +34,7 @@ export function isotherms(field: HeatField, layerName: string, valuesC: readonly
 }
 
 function regions(grid: PaddedGrid, valueC: number): MmRing[][] {
-  const contour = contours().size([grid.columns, grid.rows]).contour(Array.from(grid.valuesC), valueC);
+  const contour = contours().size([grid.columns, grid.rows]).contour(grid.valuesC, valueC);
   return contour.coordinates.map((polygon) =>
     polygon.map((ring) => ring.map(([x = 0, y = 0]) => [place(grid.xMm, x), place(grid.yMm, y)] as const)),
   );

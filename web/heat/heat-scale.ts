@@ -10,7 +10,7 @@ export type HeatScale = {
 };
 
 const widths = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 25, 50, 100, 200];
-const mostBands = 12;
+const mostBands = 16;
 
 /**
  * Scale of one picture. It starts at the air and reaches at least to the limits, so that a cool board is never shown hot.

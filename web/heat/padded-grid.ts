@@ -1,17 +1,32 @@
 import type { HeatField } from '#core/thermal/heat-field.ts';
 
 /** A layer's cells with a rim of two, and every empty cell beside the board filled, so that bands reach the board's edge. */
-export type PaddedGrid = { columns: number; rows: number; valuesC: Float64Array; xMm: Float64Array; yMm: Float64Array };
+export type PaddedGrid = { columns: number; rows: number; valuesC: number[]; xMm: Float64Array; yMm: Float64Array };
 
 const rim = 2;
 
-/** @returns null when the field has no layer of that name or no temperature in it */
+const made = new WeakMap<HeatField, Map<string, PaddedGrid | null>>();
+
+/**
+ * Made once per field and layer, as bands and isotherms both start from it.
+ * @returns null when the field has no layer of that name or no temperature in it
+ */
 export function paddedGrid(field: HeatField, layerName: string): PaddedGrid | null {
+  const ofField = made.get(field) ?? new Map<string, PaddedGrid | null>();
+  made.set(field, ofField);
+  const known = ofField.get(layerName);
+  if (known !== undefined) return known;
+  const grid = makeGrid(field, layerName);
+  ofField.set(layerName, grid);
+  return grid;
+}
+
+function makeGrid(field: HeatField, layerName: string): PaddedGrid | null {
   const layer = field.layers.find((candidate) => candidate.name === layerName);
   if (!layer) return null;
   const columns = field.columns + 2 * rim;
   const rows = field.rows + 2 * rim;
-  const valuesC = new Float64Array(columns * rows).fill(NaN);
+  const valuesC = new Array<number>(columns * rows).fill(NaN);
   for (let row = 0; row < field.rows; row++) {
     for (let column = 0; column < field.columns; column++) {
       valuesC[(row + rim) * columns + column + rim] = layer.temperatureC[row * field.columns + column] ?? NaN;
@@ -36,7 +51,7 @@ const across = [
 ] as const;
 
 /** Gives every empty cell the mean of the filled cells beside it; of those across a corner only where it has no other. */
-function spread(valuesC: Float64Array, columns: number, rows: number): void {
+function spread(valuesC: number[], columns: number, rows: number): void {
   const before = valuesC.slice();
   const meanOf = (column: number, row: number, steps: readonly (readonly [number, number])[]): number => {
     let sum = 0;

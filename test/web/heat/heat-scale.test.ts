@@ -30,10 +30,10 @@ test('heat colours – every sample from cool to hot – lightness falls strictl
   expect(xy ** 2 / (xx * yy)).toBeGreaterThan(0.99);
 });
 
-test('heat scale – air 55 °C, hottest 112 °C, limits 110 and 130 °C – bands of 10 K from 50 to 130 °C', () => {
+test('heat scale – air 55 °C, hottest 112 °C, limits 110 and 130 °C – bands of 5 K from 55 to 130 °C', () => {
   const scale = heatScale(55, 112, [110, 130]);
-  expect(scale.levels).toEqual([50, 60, 70, 80, 90, 100, 110, 120]);
-  expect([scale.minC, scale.maxC, scale.stepC]).toEqual([50, 130, 10]);
+  expect(scale.levels).toEqual([55, 60, 65, 70, 75, 80, 85, 90, 95, 100, 105, 110, 115, 120, 125]);
+  expect([scale.minC, scale.maxC, scale.stepC]).toEqual([55, 130, 5]);
 });
 
 test('heat scale – a board barely warmer than its air – reaches to the limit all the same, so that it looks cool', () => {
@@ -42,7 +42,7 @@ test('heat scale – a board barely warmer than its air – reaches to the limit
   expect(bandIndex(scale, 27)).toBe(0);
 });
 
-test('heat scale – any span – twelve bands at most, and both ends inside', () => {
+test('heat scale – any span – sixteen bands at most, and both ends inside', () => {
   for (const [airC, hottestC] of [
     [-40, -33],
     [20, 20.4],
@@ -50,7 +50,7 @@ test('heat scale – any span – twelve bands at most, and both ends inside', (
     [85, 170],
   ] as const) {
     const scale = heatScale(airC, hottestC);
-    expect(scale.levels.length).toBeLessThanOrEqual(12);
+    expect(scale.levels.length).toBeLessThanOrEqual(16);
     expect(scale.minC).toBeLessThanOrEqual(airC);
     expect(scale.maxC).toBeGreaterThanOrEqual(hottestC);
   }

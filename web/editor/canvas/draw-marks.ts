@@ -23,9 +23,9 @@ export function occupiedBy(sheet: Sheet, board: Board): (point: readonly [number
       const half = Math.max((box.right - box.left) / 2 + 20 * px, 80 * px);
       return [{ left: middle - half, right: middle + half, bottom: box.bottom - 14 * px, top: box.top + 36 * px }];
     }),
-    ...board.sources.flatMap((source) => {
-      const reach = Math.max(...source.sizeMm) / 2 + 20 * px;
-      const [x, y] = source.at;
+    ...[...board.sources, ...board.sinks].flatMap(({ at, sizeMm }) => {
+      const reach = Math.max(...sizeMm) / 2 + 20 * px;
+      const [x, y] = at;
       return [{ left: x - reach, right: x + reach, bottom: y - reach, top: y + reach }];
     }),
   ];

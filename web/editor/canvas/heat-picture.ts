@@ -31,10 +31,13 @@ export function heatPicture(check: ConditionCheck, layerName: string): HeatPictu
   const scale = conditionScale(check);
   const { field } = check;
   const limits = heatLimits(check.board, check.condition);
-  const plain = scale.levels.slice(1).filter((level) => limits.every(({ valueC }) => valueC !== level));
+  const bands = heatBands(field, layerName, scale);
   return {
-    bands: heatBands(field, layerName, scale),
-    lines: isotherms(field, layerName, plain),
+    bands,
+    // The border of a band is the isotherm of its lower temperature; the ground of the picture has none.
+    lines: bands
+      .filter(({ fromC }) => fromC > scale.minC && limits.every(({ valueC }) => valueC !== fromC))
+      .map(({ fromC, polygons }) => ({ valueC: fromC, rings: polygons.flat() })),
     limits: limits.flatMap(({ label, valueC }) =>
       isotherms(field, layerName, [valueC]).map((line) => ({ label, line })),
     ),

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import type { Finding } from '#core/result/result.ts';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { idOf, objectKeys } from '../object-key.ts';
 import { useFindings } from './use-findings.ts';
@@ -14,7 +15,7 @@ const severities = {
   caution: { word: 'Caution', className: 'text-close', sign: 'M8 1.6L15 14H1zM8 6v4M8 11.7v.3' },
 } as const;
 
-/** What is wrong or doubtful, with place and remedy; cautions (hazards) stand first. */
+/** What is wrong or doubtful, with place and remedy; what stops the board stands first, then the hazards. */
 export function FindingList() {
   const { findings, cautions } = useFindings();
   const isThere = useEditor((state) => state.checks.byCondition.size > 0);
@@ -29,19 +30,23 @@ export function FindingList() {
   }
   return (
     <ul>
+      {findings.filter(isStop).map(findingEntry)}
       {cautions.map((caution) => (
-        <Entry key={`c${caution.kind}${caution.ref}${caution.condition}`} severity="caution" item={caution} />
+        <Entry key={`${caution.kind} ${caution.ref} ${caution.condition}`} severity="caution" item={caution} />
       ))}
-      {findings.map((finding) => (
-        <Entry
-          key={`${finding.rule} ${finding.ref} ${finding.condition} ${finding.message}`}
-          severity={finding.severity}
-          item={finding}
-        >
-          <span className="block text-sm text-ink-soft">{finding.remedy}</span>
-        </Entry>
-      ))}
+      {findings.filter((finding) => !isStop(finding)).map(findingEntry)}
     </ul>
+  );
+}
+
+const isStop = ({ severity }: Finding) => severity === 'stop';
+
+function findingEntry(finding: Finding) {
+  const { rule, ref, condition, message, severity, remedy } = finding;
+  return (
+    <Entry key={`${rule} ${ref} ${condition} ${message}`} severity={severity} item={finding}>
+      <span className="block text-sm text-ink-soft">{remedy}</span>
+    </Entry>
   );
 }
 

@@ -1,4 +1,4 @@
-import { type KeyboardEvent, useMemo, useRef, useState } from 'react';
+import { type KeyboardEvent, useDeferredValue, useMemo, useRef, useState } from 'react';
 import { formatNumber } from '#core/format.ts';
 import { classes } from '#web/ui/classes.ts';
 import { VerdictMark } from '#web/ui/verdict-mark.tsx';
@@ -13,7 +13,7 @@ const cellClass = 'px-1.5 py-1.5 first:pl-4 last:pr-4';
 /** Every object as a row: arrows move, space selects (Shift adds), Delete deletes. */
 export function ObjectTable() {
   const store = useEditorStore();
-  const board = useEditor(shownBoard);
+  const board = useDeferredValue(useEditor(shownBoard));
   const check = useEditor(activeCheck);
   const selection = useEditor((state) => state.selection);
   const rows = useMemo(() => objectRows(board, check?.condition ?? null), [board, check]);

@@ -1,4 +1,5 @@
-import { commands } from '../commands/command.ts';
+import { useDeferredValue } from 'react';
+import { type Command, commands } from '../commands/command.ts';
 import { Button } from '#web/ui/button.tsx';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
@@ -27,7 +28,8 @@ export function PropertiesPanel() {
 }
 
 function OnePanel({ objectKey }: { objectKey: ObjectKey }) {
-  const board = useEditor(shownBoard);
+  // The figures may come a moment after the picture; a drag must not wait for them.
+  const board = useDeferredValue(useEditor(shownBoard));
   const id = idOf(objectKey);
   switch (kindOf(objectKey)) {
     case 'regulator': {
@@ -65,22 +67,28 @@ function OnePanel({ objectKey }: { objectKey: ObjectKey }) {
 
 /** Acts on the selection that also have keys. */
 function SelectionActs() {
-  const store = useEditorStore();
-  const state = useEditor((present) => present);
   return (
     <div className="flex flex-wrap gap-2 px-4 py-3">
-      {[commands.rotate, commands.pickUp, commands.duplicate, commands.delete].map((command) => (
-        <Button
-          key={command.id}
-          size="small"
-          variant={command.id === 'delete' ? 'danger' : 'plain'}
-          disabled={!command.may(state)}
-          title={command.keys.join(', ')}
-          onClick={() => command.run(store)}
-        >
-          {command.id === 'rotate' ? 'Rotate 90°' : command.id === 'pick-up' ? 'Pick up' : command.label}
-        </Button>
-      ))}
+      <Act command={commands.rotate} word="Rotate 90°" />
+      <Act command={commands.pickUp} word="Pick up" />
+      <Act command={commands.duplicate} />
+      <Act command={commands.delete} isDanger />
     </div>
+  );
+}
+
+function Act({ command, word, isDanger = false }: { command: Command; word?: string; isDanger?: boolean }) {
+  const store = useEditorStore();
+  const may = useEditor(command.may);
+  return (
+    <Button
+      size="small"
+      variant={isDanger ? 'danger' : 'plain'}
+      disabled={!may}
+      title={`${command.label} (${command.keys.join(', ')})`}
+      onClick={() => command.run(store)}
+    >
+      {word ?? command.label}
+    </Button>
   );
 }

@@ -11,6 +11,7 @@ import { DropperFields } from './dropper-fields.tsx';
 import { FeedField } from './feed-field.tsx';
 import { Group, Wide } from './group.tsx';
 import { LandNetFields } from './land-net-fields.tsx';
+import { LoadField } from './load-field.tsx';
 import { NameField } from './name-field.tsx';
 import { PlaceFields } from './place-fields.tsx';
 import { RegulatorResultLines } from './regulator-result-lines.tsx';
@@ -86,6 +87,7 @@ export function RegulatorPanel({ regulator }: { regulator: Regulator }) {
         ))}
       </Group>
       <Group title="Feed and power">
+        <LoadField objectRef={ref} field="loadsA" />
         <FeedField regulator={regulator} onChange={(feed) => change('the feed', { feed })} disabled={disabled} />
         <QuantityField
           label="Known dissipation"

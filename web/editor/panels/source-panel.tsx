@@ -9,6 +9,7 @@ import { activeCheck } from '../canvas/use-heat-picture.ts';
 import { useEditor } from '../editor-context.ts';
 import { objectKey } from '../object-key.ts';
 import { Group } from './group.tsx';
+import { LoadField } from './load-field.tsx';
 import { NameField } from './name-field.tsx';
 import { PlaceFields } from './place-fields.tsx';
 import { SizeFields } from './size-fields.tsx';
@@ -66,7 +67,7 @@ export function SourcePanel({ source }: { source: HeatSource }) {
       </Group>
       <Group
         title="Heat"
-        note="Without a power it is heated only by droppers that name it; a condition may set another."
+        note="Without a power it is heated only by droppers that name it. What a condition says goes before."
       >
         <QuantityField
           label="Power"
@@ -78,6 +79,7 @@ export function SourcePanel({ source }: { source: HeatSource }) {
           disabled={disabled}
           onCommit={(powerW) => change('the power', { powerW })}
         />
+        <LoadField objectRef={ref} field="powersW" />
         <QuantityField
           label="Limit"
           unit="°C"
