@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { bandIndex, heatColours, heatScale } from '#web/heat/heat-scale.ts';
+import { bandIndex, heatColours, heatScale } from '#core/drawing/heat-scale.ts';
 
 /** CIELAB L* of an sRGB colour (IEC 61966-2-1 to CIE 1976, white of relative luminance 1). */
 function lightness(hex: string): number {

@@ -1,9 +1,9 @@
 import { expect, test } from 'vitest';
 import type { HeatField } from '#core/thermal/heat-field.ts';
 import { decodeHeatField } from '#web/heat/decode-heat-field.ts';
-import { heatBands, isotherms } from '#web/heat/heat-bands.ts';
-import { heatScale } from '#web/heat/heat-scale.ts';
-import { isothermLabels } from '#web/heat/isotherm-label.ts';
+import { heatBands, isotherms } from '#core/drawing/heat-bands.ts';
+import { heatScale } from '#core/drawing/heat-scale.ts';
+import { isothermLabels } from '#core/drawing/isotherm-label.ts';
 import { temperatureAt, temperatureRange } from '#web/heat/temperature-at.ts';
 
 /** Rows from the lowest y upwards, as in a heat field. */
