@@ -28,16 +28,16 @@ seed: ## Load the demo team and assemblies into the local database; safe to repe
 migrate: ## Bring the local database to the newest state
 	@exec node api/launch/local.js migrate
 
-rollback: ## Take back the newest batch of migrations of the local database
+rollback: ## Take back the newest migration of the local database
 	@exec node api/launch/local.js rollback
 
-backup: ## Write the local database to a file (BACKUP=file)
+backup: ## Write the local database to a file (BACKUP=file for a name of your own)
 	@exec node api/launch/local.js backup "$(BACKUP)"
 
 restore: ## Replace the local database by a backup (BACKUP=file)
 	@exec node api/launch/local.js restore "$(BACKUP)"
 
-stop: ## Stop the local database that an interrupted start left running
+stop: ## End what runs from this folder, also what a killed start has left behind
 	@exec node api/launch/local.js stop
 
 clean: ## Remove what was built, and the local database with all that it holds (asks first; YES=1 answers)

@@ -2,11 +2,12 @@ import { spawn } from 'node:child_process';
 import { projectFolder } from './local-folder.js';
 
 /** Runs a program to its end, its output shown only when it fails. @throws Error with that output */
-export function runTool(command, words, { env = process.env, show = false } = {}) {
+export function runTool(command, words, { env = process.env, show = false, signal } = {}) {
   return new Promise((done, failed) => {
     const child = spawn(command, words, {
       cwd: projectFolder,
       env,
+      signal,
       stdio: ['ignore', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
     });
     let output = '';

@@ -4,17 +4,33 @@ import { join } from 'node:path';
 
 const debianFolder = '/usr/lib/postgresql';
 
-/** Folder of PostgreSQL's programs: PG_BIN, Debian's newest, or the one on PATH; null when there is none. */
-export function findPostgres() {
-  if (process.env.PG_BIN) return process.env.PG_BIN;
-  if (existsSync(debianFolder)) {
-    const versions = readdirSync(debianFolder)
-      .filter((version) => existsSync(join(debianFolder, version, 'bin', 'postgres')))
-      .sort((a, b) => Number(b) - Number(a));
-    if (versions[0]) return join(debianFolder, versions[0], 'bin');
-  }
+/**
+ * Folder of PostgreSQL's programs: PG_BIN, Debian's newest, or the one on PATH; null when there is none.
+ * @param {string} [version] the only major version that will do
+ * @returns {string | null}
+ */
+export function findPostgres(version) {
+  const candidates = [process.env.PG_BIN, ...debianFolders(), folderOnPath()].filter(Boolean);
+  return candidates.find((folder) => version === undefined || versionOf(folder) === version) ?? null;
+}
+
+function debianFolders() {
+  if (!existsSync(debianFolder)) return [];
+  return readdirSync(debianFolder)
+    .sort((a, b) => Number(b) - Number(a))
+    .map((version) => join(debianFolder, version, 'bin'))
+    .filter((folder) => existsSync(join(folder, 'postgres')) && existsSync(join(folder, 'initdb')));
+}
+
+function folderOnPath() {
   const found = spawnSync('sh', ['-c', 'command -v postgres'], { encoding: 'utf8' }).stdout.trim();
-  return found ? found.replace(/\/postgres$/, '') : null;
+  return found.replace(/\/postgres$/, '');
+}
+
+/** `postgres (PostgreSQL) 15.14 (Debian …)` says 15. */
+function versionOf(folder) {
+  const said = spawnSync(join(folder, 'postgres'), ['--version'], { encoding: 'utf8' }).stdout ?? '';
+  return /\) (\d+)/.exec(said)?.[1] ?? null;
 }
 
 /**
@@ -45,12 +61,19 @@ let isListUpdated = false;
 /** @throws Error when apt-get fails, with its last lines */
 export function aptInstall(packages) {
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
-  const run = (words) => spawnSync('apt-get', words, { env, encoding: 'utf8', stdio: ['ignore', 'pipe', 'pipe'] });
+  const run = (words) =>
+    // Waits where another installation holds dpkg's lock.
+    spawnSync('apt-get', ['-q', '-o', 'DPkg::Lock::Timeout=120', ...words], {
+      env,
+      encoding: 'utf8',
+      stdio: ['ignore', 'pipe', 'pipe'],
+      maxBuffer: 2 ** 28,
+    });
   if (!isListUpdated) {
-    run(['update', '-q']);
+    run(['update']);
     isListUpdated = true;
   }
-  const result = run(['install', '-y', '-q', '--no-install-recommends', ...packages]);
+  const result = run(['install', '-y', '--no-install-recommends', ...packages]);
   if (result.status !== 0) {
     throw new Error(
       `apt-get install ${packages.join(' ')} failed:\n${(result.stderr || '').split('\n').slice(-6).join('\n')}`,

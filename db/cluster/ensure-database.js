@@ -26,3 +26,18 @@ export function replaceDatabase(url, name, by) {
       await client.query(`alter database ${pg.escapeIdentifier(by)} rename to ${pg.escapeIdentifier(name)}`);
   });
 }
+
+/** Number of the lock under which migrations run; any constant that nothing else in the database uses. */
+const migrationLock = 4_680_001;
+
+/** Runs something while no other process does so on the same database; it waits for its turn. */
+export async function withSessionLock(url, act) {
+  const client = new pg.Client({ connectionString: url, connectionTimeoutMillis: 5000 });
+  await client.connect();
+  try {
+    await client.query('select pg_advisory_lock($1)', [migrationLock]);
+    return await act();
+  } finally {
+    await client.end();
+  }
+}
