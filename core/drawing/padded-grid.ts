@@ -26,7 +26,7 @@ function makeGrid(field: HeatField, layerName: string): PaddedGrid | null {
   if (!layer) return null;
   const columns = field.columns + 2 * rim;
   const rows = field.rows + 2 * rim;
-  const valuesC = new Array<number>(columns * rows).fill(NaN);
+  const valuesC = Array.from({ length: columns * rows }, () => NaN);
   for (let row = 0; row < field.rows; row++) {
     for (let column = 0; column < field.columns; column++) {
       valuesC[(row + rim) * columns + column + rim] = layer.temperatureC[row * field.columns + column] ?? NaN;

@@ -3,7 +3,7 @@ import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
 import type { Camera, ViewSize } from './camera.ts';
 import { type History, noHistory, recorded, redone, undone } from './history.ts';
-import { type ObjectKey, hasObject } from './object-key.ts';
+import { type ObjectKey, hasObject } from '#core/board/object-key.ts';
 import type { SaveState } from './saving/save-state.ts';
 import { type Checks, noChecks } from './solve/checks.ts';
 import { type Gesture, idle } from './tools/gesture.ts';

@@ -1,3 +1,4 @@
+import { tidyMm } from '#core/board/edits/tidy-mm.ts';
 import type { Point } from '#core/board/outline.ts';
 
 /** Steps of the snap grid that can be chosen, mm. */
@@ -12,11 +13,6 @@ export function snapped(point: readonly [number, number], stepMm: number): Point
 
 export function onStep(valueMm: number, stepMm: number): number {
   return tidyMm(Math.round(valueMm / stepMm) * stepMm);
-}
-
-/** To the nanometre. */
-export function tidyMm(valueMm: number): number {
-  return Math.round(valueMm * 1e6) / 1e6 + 0;
 }
 
 /** Step of an arrow key: the grid, ten times it with Shift, 0.1 mm with Alt. */

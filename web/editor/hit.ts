@@ -2,8 +2,8 @@ import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
 import { polygonContains } from '#core/geometry/polygon.ts';
 import { distanceToEdge } from '#core/geometry/ring-checks.ts';
-import { type ObjectKey, objectKey } from './object-key.ts';
-import { type Box, boxOf, cornersOf, objectRings } from './object-rings.ts';
+import { type ObjectKey, objectKey } from '#core/board/object-key.ts';
+import { type Box, boxOf, cornersOf, objectRings } from '#core/board/object-rings.ts';
 
 /**
  * Object below a point, the smallest kind first: probes, parts, heat sources, via fields, sinks, then copper of the

@@ -1,5 +1,5 @@
 import type { Board } from '#core/board/document.ts';
-import { objectKey, objectName } from './object-key.ts';
+import { objectKey, objectName } from '#core/board/object-key.ts';
 
 /** Names of the objects that lie on or end at a layer; while there are any, it cannot be removed. */
 export function layerUsers(board: Board, layer: string): string[] {

@@ -1,5 +1,5 @@
 import type { Board } from '#core/board/document.ts';
-import { type ObjectKey, idOf, kindOf, objectKeys, objectName } from './object-key.ts';
+import { type ObjectKey, idOf, kindOf, objectKeys, objectName } from '#core/board/object-key.ts';
 
 /** What changed from one board to another, object by object, in words. */
 export function objectDifferences(before: Board, after: Board): string[] {

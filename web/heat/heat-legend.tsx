@@ -1,5 +1,5 @@
 import { formatQuantity } from '#core/format.ts';
-import { type HeatScale, bandColour } from './heat-scale.ts';
+import { type HeatScale, bandColour } from '#core/drawing/heat-scale.ts';
 
 export type HeatLimit = { label: string; valueC: number };
 

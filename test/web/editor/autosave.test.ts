@@ -1,7 +1,7 @@
 import { afterEach, beforeEach, expect, test, vi } from 'vitest';
 import type { Board } from '#core/board/document.ts';
 import type { Problem } from '#core/contract/problem.ts';
-import { setTitle } from '#web/editor/edits/set-title.ts';
+import { setTitle } from '#core/board/edits/set-title.ts';
 import { commit, undo } from '#web/editor/editor-store.ts';
 import { startAutosave } from '#web/editor/saving/autosave.ts';
 import type { Draft, DraftStore } from '#web/editor/saving/draft-store.ts';

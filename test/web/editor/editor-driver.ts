@@ -8,7 +8,7 @@ import { pointerInput } from '#web/editor/tools/pointer-input.ts';
 import { toolOf } from '#web/editor/tools/tool-of.ts';
 import type { ToolName } from '#web/editor/tools/tool-name.ts';
 import { nudge } from '#web/editor/commands/nudge.ts';
-import { smallDocument } from './small-board.ts';
+import { smallDocument } from '#test/core/board/small-board.ts';
 
 type Mm = readonly [number, number];
 type Keys = { shift?: boolean; alt?: boolean };

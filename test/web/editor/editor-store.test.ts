@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { changesSinceSave, commit, isDirty, redo, undo } from '#web/editor/editor-store.ts';
-import { setTitle } from '#web/editor/edits/set-title.ts';
+import { setTitle } from '#core/board/edits/set-title.ts';
 import { driveEditor } from './editor-driver.ts';
 
 test('undo – 300 edits, then 300 times undo – the very same board as before, and redo leads back to the very same last one', () => {

@@ -45,10 +45,8 @@ export function BoardCanvas() {
       role="application"
       aria-label="Board canvas"
       aria-describedby="canvas-help"
-      tabIndex={0}
       className="relative size-full touch-none overflow-hidden outline-offset-[-3px] select-none"
       style={{ cursor: tool === 'select' ? 'default' : tool === 'hand' ? 'grab' : 'crosshair' }}
-      onContextMenu={(event) => event.preventDefault()}
     >
       <p id="canvas-help" className="sr-only">
         Everything on it is listed in the panel Objects. With a drawing tool the arrow keys move a crosshair and Enter

@@ -1,5 +1,5 @@
 import type { Board } from '#core/board/document.ts';
-import { bodyRing, landRings, rectangleRing } from '../footprint.ts';
+import { bodyRing, landRings, rectangleRing } from '#core/board/footprint.ts';
 import { toScreen } from '../camera.ts';
 import { drawnGridStep } from '../grid.ts';
 import { copperTone } from './palette.ts';

@@ -1,8 +1,8 @@
 import type { Board } from '#core/board/document.ts';
 import { polygonContains } from '#core/geometry/polygon.ts';
 import { formatGiven, formatQuantity } from '#core/format.ts';
-import type { HeatBand, Isotherm } from '#web/heat/heat-bands.ts';
-import { isothermLabels } from '#web/heat/isotherm-label.ts';
+import type { HeatBand, Isotherm } from '#core/drawing/heat-bands.ts';
+import { isothermLabels } from '#core/drawing/isotherm-label.ts';
 import { toScreen } from '../camera.ts';
 
 import { boardRings } from './draw-board.ts';

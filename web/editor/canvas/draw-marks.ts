@@ -2,8 +2,8 @@ import type { Board } from '#core/board/document.ts';
 import { formatQuantity } from '#core/format.ts';
 import type { Verdict } from '#core/result/result.ts';
 import { toScreen } from '../camera.ts';
-import { bodyRing } from '../footprint.ts';
-import { boxOf } from '../object-rings.ts';
+import { bodyRing } from '#core/board/footprint.ts';
+import { boxOf } from '#core/board/object-rings.ts';
 import { type Sheet, strokePath } from './sheet.ts';
 
 /** What stands beside a part on the canvas. */

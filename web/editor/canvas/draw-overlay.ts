@@ -2,9 +2,9 @@ import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
 import { formatQuantity } from '#core/format.ts';
 import { toScreen } from '../camera.ts';
-import { rectangleRing, rectangleBetween } from '../footprint.ts';
-import type { ObjectKey } from '../object-key.ts';
-import { boxOf, cornersOf, objectRings } from '../object-rings.ts';
+import { rectangleRing, rectangleBetween } from '#core/board/footprint.ts';
+import type { ObjectKey } from '#core/board/object-key.ts';
+import { boxOf, cornersOf, objectRings } from '#core/board/object-rings.ts';
 import type { Gesture } from '../tools/gesture.ts';
 import { type Sheet, drawText, strokePath, strokeRings, strokeTwice } from './sheet.ts';
 

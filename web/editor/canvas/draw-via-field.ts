@@ -1,6 +1,6 @@
 import type { ViaField } from '#core/board/copper.ts';
 import { toScreen } from '../camera.ts';
-import { pitchOf, viaFieldRing } from '../footprint.ts';
+import { pitchOf, viaFieldRing } from '#core/board/footprint.ts';
 import { type Sheet, hatchRings, strokePath, strokeTwice } from './sheet.ts';
 
 /** Holes smaller than this on the screen are drawn as a dotted field instead, px. */

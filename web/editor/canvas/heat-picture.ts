@@ -1,7 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import type { ConditionResult } from '#core/result/result.ts';
-import { type HeatScale, heatScale } from '#web/heat/heat-scale.ts';
-import { heatBands, isotherms } from '#web/heat/heat-bands.ts';
+import { type HeatScale, heatScale } from '#core/drawing/heat-scale.ts';
+import { heatBands, isotherms } from '#core/drawing/heat-bands.ts';
 import type { HeatLimit } from '#web/heat/heat-legend.tsx';
 import type { ConditionCheck } from '../solve/checks.ts';
 import type { HeatPicture } from './draw-heat.ts';

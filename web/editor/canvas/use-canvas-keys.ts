@@ -10,6 +10,7 @@ export function useCanvasKeys(store: EditorStore) {
   const spaceHeld = useRef(false);
   const handlers = useMemo(
     () => ({
+      tabIndex: 0,
       onKeyDown(event: KeyboardEvent<HTMLDivElement>) {
         const keys = { shift: event.shiftKey, alt: event.altKey };
         if (isArrow(event.key) && !event.ctrlKey && !event.metaKey) {

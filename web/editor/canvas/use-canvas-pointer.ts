@@ -1,4 +1,4 @@
-import { type PointerEvent, type RefObject, useEffect, useMemo, useRef } from 'react';
+import { type MouseEvent, type PointerEvent, type RefObject, useEffect, useMemo, useRef } from 'react';
 import { type ScreenPoint, panned, toBoard, zoomedAt } from '../camera.ts';
 import type { EditorStore } from '../editor-store.ts';
 import { idle } from '../tools/gesture.ts';
@@ -66,6 +66,9 @@ export function useCanvasPointer(
       },
       onPointerLeave() {
         store.setState({ pointer: null });
+      },
+      onContextMenu(event: MouseEvent<HTMLDivElement>) {
+        event.preventDefault();
       },
       onDoubleClick() {
         toolOf(store.getState()).finish?.(store);

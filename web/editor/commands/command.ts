@@ -1,10 +1,10 @@
-import { deleteObjects } from '#web/editor/edits/delete-objects.ts';
-import { duplicateObjects } from '#web/editor/edits/duplicate-objects.ts';
-import { rotateObjects } from '#web/editor/edits/rotate-objects.ts';
+import { deleteObjects } from '#core/board/edits/delete-objects.ts';
+import { duplicateObjects } from '#core/board/edits/duplicate-objects.ts';
+import { rotateObjects } from '#core/board/edits/rotate-objects.ts';
 import { announce } from '#web/ui/announce.ts';
 import { type EditorState, type EditorStore, commit, redo, undo } from '../editor-store.ts';
 import { fitBoard, zoomBy } from '../fit.ts';
-import { objectKeys } from '../object-key.ts';
+import { objectKeys } from '#core/board/object-key.ts';
 import { named, pickUp } from '../tools/select-tool.ts';
 import { type ToolName, toolNames, toolWords } from '../tools/tool-name.ts';
 

@@ -1,4 +1,4 @@
-import { moveObjects } from '#web/editor/edits/move-objects.ts';
+import { moveObjects } from '#core/board/edits/move-objects.ts';
 import { type EditorStore, commit } from '../editor-store.ts';
 import { type ArrowKey, arrowStep } from '../tools/crosshair.ts';
 import { named } from '../tools/select-tool.ts';

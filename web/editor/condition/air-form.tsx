@@ -1,6 +1,6 @@
 import { Popover } from 'radix-ui';
 import { Link } from 'react-router-dom';
-import { changeCondition } from '#web/editor/edits/change-condition.ts';
+import { changeCondition } from '#core/board/edits/change-condition.ts';
 import type { Condition } from '#core/board/condition.ts';
 import { formatQuantity } from '#core/format.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';

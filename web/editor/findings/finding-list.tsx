@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import type { Finding } from '#core/result/result.ts';
 import { useEditor, useEditorStore } from '../editor-context.ts';
-import { idOf, objectKeys } from '../object-key.ts';
+import { idOf, objectKeys } from '#core/board/object-key.ts';
 import { useFindings } from './use-findings.ts';
 
 const severities = {

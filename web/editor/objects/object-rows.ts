@@ -1,7 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import type { ConditionResult, Verdict } from '#core/result/result.ts';
-import { type ObjectKey, idOf, kindOf, objectKeys } from '../object-key.ts';
-import { positionOf } from '../object-rings.ts';
+import { type ObjectKey, idOf, kindOf, objectKeys } from '#core/board/object-key.ts';
+import { positionOf } from '#core/board/object-rings.ts';
 
 /** One line of the object list: the canvas's twin for reading. */
 export type ObjectRow = {

@@ -30,6 +30,7 @@ type Props = {
 export function Editor({ revision, sketch, userId }: Props) {
   const [store] = useState(() => createEditorStore({ ...sketch, readOnly: null }));
   const [keysShown, showKeys] = useState(false);
+  const [postponed, postpone] = useState<number | null>(null);
   useReadOnly(store, revision);
   const autosave = useAutosave(store, { revisionId: revision.id, userId, sketch });
   useSolving(store);
@@ -38,7 +39,7 @@ export function Editor({ revision, sketch, userId }: Props) {
   return (
     <EditorContext value={store}>
       <div className="flex min-h-0 min-w-0 flex-1 flex-col">
-        <ToolBar showKeys={() => showKeys(true)} />
+        <ToolBar showKeys={() => showKeys(true)} retry={() => void autosave.flush()} decide={() => postpone(null)} />
         <ConditionBar revisionId={revision.id} maySolve={revision.allowed.includes('solve')} flush={autosave.flush} />
         <div className="flex min-h-0 min-w-0 flex-1 flex-col lg:flex-row">
           <section aria-label="Board" className="relative flex min-h-72 min-w-0 flex-[3] flex-col lg:min-h-0">
@@ -53,7 +54,7 @@ export function Editor({ revision, sketch, userId }: Props) {
         </div>
       </div>
       <KeysDialog open={keysShown} onOpenChange={showKeys} />
-      <ConflictDialog autosave={autosave} />
+      <ConflictDialog autosave={autosave} postponed={postponed} postpone={postpone} />
       <LeaveDialog flush={autosave.flush} />
     </EditorContext>
   );

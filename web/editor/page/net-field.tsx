@@ -37,7 +37,9 @@ export function NetField({ label, value, onCommit, disabled }: Props) {
       />
       <datalist id={`${id}-nets`}>
         {netNames(board).map((net) => (
-          <option key={net} value={net} />
+          <option key={net} value={net}>
+            {net}
+          </option>
         ))}
       </datalist>
     </span>

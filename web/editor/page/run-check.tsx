@@ -36,7 +36,6 @@ export function RunCheck({ revisionId, maySolve, flush }: Props) {
 
   useEffect(() => {
     if (state === undefined || state === 'waiting' || state === 'running') return;
-    setJobId(null);
     if (state === 'failed') {
       toast.error('The check failed', { description: job.data?.message ?? 'The server gave no reason.' });
     }
@@ -46,7 +45,8 @@ export function RunCheck({ revisionId, maySolve, flush }: Props) {
       .then((result) => state === 'done' && result && announce(`Check stored: ${verdictWords[result.result.verdict]}`));
   }, [state, client, revisionId, job.data?.message]);
 
-  if (jobId !== null) {
+  const isRunning = state === undefined || state === 'waiting' || state === 'running';
+  if (jobId !== null && isRunning) {
     return (
       <div className="flex items-center gap-3 text-sm" role="status">
         <span>

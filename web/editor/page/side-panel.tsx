@@ -4,7 +4,7 @@ import { tabClass } from '#web/ui/tab-class.ts';
 import { FindingList } from '../findings/finding-list.tsx';
 import { useFindings } from '../findings/use-findings.ts';
 import { useEditor } from '../editor-context.ts';
-import { objectKeys } from '../object-key.ts';
+import { objectKeys } from '#core/board/object-key.ts';
 import { ObjectTable } from '../objects/object-table.tsx';
 import { PropertiesPanel } from '../panels/properties-panel.tsx';
 

@@ -3,7 +3,7 @@ import { classes } from '#web/ui/classes.ts';
 import { chooseTool, commands } from '../commands/command.ts';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { type ToolName, toolWords } from '../tools/tool-name.ts';
-import { SaveText } from './save-text.tsx';
+import { type SaveActs, SaveText } from './save-text.tsx';
 import { ToolSign } from './tool-sign.tsx';
 
 const groups: readonly (readonly ToolName[])[] = [
@@ -16,7 +16,7 @@ const itemClass =
   'inline-flex min-h-9 items-center gap-1.5 rounded-sm px-2 text-sm whitespace-nowrap hover:bg-copper-soft disabled:text-unknown disabled:hover:bg-transparent aria-checked:bg-ink aria-checked:text-paper';
 
 /** Tools, undo, zoom: one stop of the Tab key, arrow keys inside. */
-export function ToolBar({ showKeys }: { showKeys: () => void }) {
+export function ToolBar({ showKeys, ...saveActs }: { showKeys: () => void } & SaveActs) {
   const store = useEditorStore();
   const tool = useEditor((state) => state.tool);
   const mayEdit = useEditor((state) => state.readOnly === null);
@@ -74,7 +74,7 @@ export function ToolBar({ showKeys }: { showKeys: () => void }) {
         </div>
       </Toolbar.Root>
       <div className="ml-auto py-1">
-        <SaveText />
+        <SaveText {...saveActs} />
       </div>
     </div>
   );

@@ -1,7 +1,7 @@
 import { useEffect } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import type { EditorStore } from '../editor-store.ts';
-import { idOf, objectKeys } from '../object-key.ts';
+import { idOf, objectKeys } from '#core/board/object-key.ts';
 
 /** Condition and selection live in the address, so that a link leads to the same view. */
 export function useSearchSync(store: EditorStore): void {

@@ -1,7 +1,7 @@
-import { setTitle } from '#web/editor/edits/set-title.ts';
+import { setTitle } from '#core/board/edits/set-title.ts';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
-import { outlineKey } from '../object-key.ts';
+import { outlineKey } from '#core/board/object-key.ts';
 import { Button } from '#web/ui/button.tsx';
 import { Group, Wide } from './group.tsx';
 import { NameField } from './name-field.tsx';

@@ -1,5 +1,5 @@
-import { changeCopperLayer } from '#web/editor/edits/change-copper-layer.ts';
-import { removeCopperLayer } from '#web/editor/edits/remove-copper-layer.ts';
+import { changeCopperLayer } from '#core/board/edits/change-copper-layer.ts';
+import { removeCopperLayer } from '#core/board/edits/remove-copper-layer.ts';
 import type { CopperLayer } from '#core/board/stackup.ts';
 import { Button } from '#web/ui/button.tsx';
 import { CheckField } from '#web/ui/check-field.tsx';

@@ -1,10 +1,10 @@
-import { insertCorner } from '#web/editor/edits/insert-corner.ts';
-import { moveCorner } from '#web/editor/edits/move-corner.ts';
-import { removeCorner } from '#web/editor/edits/remove-corner.ts';
+import { insertCorner } from '#core/board/edits/insert-corner.ts';
+import { moveCorner } from '#core/board/edits/move-corner.ts';
+import { removeCorner } from '#core/board/edits/remove-corner.ts';
 import type { Ring } from '#core/board/outline.ts';
 import { Button } from '#web/ui/button.tsx';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
-import { type ObjectKey, objectName } from '../object-key.ts';
+import { type ObjectKey, objectName } from '#core/board/object-key.ts';
 import { useEdit } from './use-edit.ts';
 
 const mostShown = 200;

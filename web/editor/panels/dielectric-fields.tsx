@@ -1,4 +1,4 @@
-import { changeDielectric } from '#web/editor/edits/change-dielectric.ts';
+import { changeDielectric } from '#core/board/edits/change-dielectric.ts';
 import type { DielectricLayer } from '#core/board/stackup.ts';
 import { useQuery } from '@tanstack/react-query';
 import { libraryQuery } from '#web/library/library-query.ts';

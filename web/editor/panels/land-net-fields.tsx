@@ -1,4 +1,4 @@
-import { changePart } from '#web/editor/edits/change-part.ts';
+import { changePart } from '#core/board/edits/change-part.ts';
 import type { LandNet, Part } from '#core/board/part.ts';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { useEditor } from '../editor-context.ts';

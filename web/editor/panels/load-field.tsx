@@ -1,4 +1,4 @@
-import { changeCondition } from '#web/editor/edits/change-condition.ts';
+import { changeCondition } from '#core/board/edits/change-condition.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
 import { useEditor } from '../editor-context.ts';
 import { useEdit } from './use-edit.ts';

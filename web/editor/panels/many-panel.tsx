@@ -1,9 +1,9 @@
-import { moveObjects } from '#web/editor/edits/move-objects.ts';
-import { rotateObjects } from '#web/editor/edits/rotate-objects.ts';
+import { moveObjects } from '#core/board/edits/move-objects.ts';
+import { rotateObjects } from '#core/board/edits/rotate-objects.ts';
 import { useState } from 'react';
 import { Button } from '#web/ui/button.tsx';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
-import { type ObjectKey, objectName } from '../object-key.ts';
+import { type ObjectKey, objectName } from '#core/board/object-key.ts';
 import { Group, Wide } from './group.tsx';
 import { useEdit } from './use-edit.ts';
 

@@ -55,7 +55,9 @@ export function NameField({ label, value, onCommit, refuse, offered, disabled, m
       {offered ? (
         <datalist id={listId}>
           {offered.map((text) => (
-            <option key={text} value={text} />
+            <option key={text} value={text}>
+              {text}
+            </option>
           ))}
         </datalist>
       ) : null}

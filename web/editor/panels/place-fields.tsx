@@ -1,7 +1,7 @@
-import { moveObjects } from '#web/editor/edits/move-objects.ts';
-import { rotateObjects } from '#web/editor/edits/rotate-objects.ts';
+import { moveObjects } from '#core/board/edits/move-objects.ts';
+import { rotateObjects } from '#core/board/edits/rotate-objects.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
-import { type ObjectKey, objectName } from '../object-key.ts';
+import { type ObjectKey, objectName } from '#core/board/object-key.ts';
 import { useEdit } from './use-edit.ts';
 
 type Props = { objectKey: ObjectKey; at: readonly [number, number]; rotationDeg?: number };

@@ -1,12 +1,12 @@
-import { changePour } from '#web/editor/edits/change-pour.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changePour } from '#core/board/edits/change-pour.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { Pour } from '#core/board/copper.ts';
 import { Button } from '#web/ui/button.tsx';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { useEditor } from '../editor-context.ts';
 import { netNames } from '../net-names.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { CornerTable } from './corner-table.tsx';
 import { Group, Wide } from './group.tsx';
 import { NameField } from './name-field.tsx';

@@ -1,11 +1,11 @@
-import { changeProbe } from '#web/editor/edits/change-probe.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changeProbe } from '#core/board/edits/change-probe.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { Probe, Side } from '#core/board/placement.ts';
 import { formatQuantity } from '#core/format.ts';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { activeCheck } from '../canvas/use-heat-picture.ts';
 import { useEditor } from '../editor-context.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { Group } from './group.tsx';
 import { NameField } from './name-field.tsx';
 import { PlaceFields } from './place-fields.tsx';

@@ -3,7 +3,7 @@ import { type Command, commands } from '../commands/command.ts';
 import { Button } from '#web/ui/button.tsx';
 import { useEditor, useEditorStore } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
-import { type ObjectKey, idOf, kindOf } from '../object-key.ts';
+import { type ObjectKey, idOf, kindOf } from '#core/board/object-key.ts';
 import { BoardPanel } from './board-panel.tsx';
 import { ManyPanel } from './many-panel.tsx';
 import { PourPanel } from './pour-panel.tsx';

@@ -1,12 +1,12 @@
-import { changeRegulator } from '#web/editor/edits/change-regulator.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changeRegulator } from '#core/board/edits/change-regulator.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { Regulator, Side } from '#core/board/placement.ts';
 import { formatGiven } from '#core/format.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { useEditor } from '../editor-context.ts';
 import { netNames } from '../net-names.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { DropperFields } from './dropper-fields.tsx';
 import { FeedField } from './feed-field.tsx';
 import { Group, Wide } from './group.tsx';

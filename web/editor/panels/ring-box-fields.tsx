@@ -1,8 +1,8 @@
-import { scaleRing } from '#web/editor/edits/scale-ring.ts';
+import { scaleRing } from '#core/board/edits/scale-ring.ts';
 import type { Ring } from '#core/board/outline.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
-import { type ObjectKey, objectName } from '../object-key.ts';
-import { type Box, boxOf } from '../object-rings.ts';
+import { type ObjectKey, objectName } from '#core/board/object-key.ts';
+import { type Box, boxOf } from '#core/board/object-rings.ts';
 import { Group } from './group.tsx';
 import { useEdit } from './use-edit.ts';
 

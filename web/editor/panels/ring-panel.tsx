@@ -1,5 +1,5 @@
 import type { Ring } from '#core/board/outline.ts';
-import { type ObjectKey, objectName } from '../object-key.ts';
+import { type ObjectKey, objectName } from '#core/board/object-key.ts';
 import { CornerTable } from './corner-table.tsx';
 import { RingBoxFields } from './ring-box-fields.tsx';
 

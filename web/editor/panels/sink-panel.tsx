@@ -1,10 +1,10 @@
-import { changeSink } from '#web/editor/edits/change-sink.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changeSink } from '#core/board/edits/change-sink.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { Sink } from '#core/board/copper.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { useEditor } from '../editor-context.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { Group } from './group.tsx';
 import { NameField } from './name-field.tsx';
 import { PlaceFields } from './place-fields.tsx';

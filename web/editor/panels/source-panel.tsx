@@ -1,5 +1,5 @@
-import { changeSource } from '#web/editor/edits/change-source.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changeSource } from '#core/board/edits/change-source.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { HeatSource, Side } from '#core/board/placement.ts';
 import { formatQuantity } from '#core/format.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
@@ -7,7 +7,7 @@ import { SelectField } from '#web/ui/select-field.tsx';
 import { VerdictMark } from '#web/ui/verdict-mark.tsx';
 import { activeCheck } from '../canvas/use-heat-picture.ts';
 import { useEditor } from '../editor-context.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { Group } from './group.tsx';
 import { LoadField } from './load-field.tsx';
 import { NameField } from './name-field.tsx';

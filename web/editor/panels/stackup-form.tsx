@@ -1,5 +1,5 @@
-import { addCopperLayer } from '#web/editor/edits/add-copper-layer.ts';
-import { changeStackup } from '#web/editor/edits/change-stackup.ts';
+import { addCopperLayer } from '#core/board/edits/add-copper-layer.ts';
+import { changeStackup } from '#core/board/edits/change-stackup.ts';
 import type { Stackup } from '#core/board/stackup.ts';
 import { formatGiven } from '#core/format.ts';
 import { Button } from '#web/ui/button.tsx';

@@ -1,5 +1,5 @@
 import type { Board } from '#core/board/document.ts';
-import { idOf, objectKeys } from '../object-key.ts';
+import { idOf, objectKeys } from '#core/board/object-key.ts';
 
 /** Why a reference or id cannot be given; null when it is free. */
 export function takenName(board: Board, name: string): string | null {

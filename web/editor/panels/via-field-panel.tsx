@@ -1,12 +1,12 @@
-import { changeViaField } from '#web/editor/edits/change-via-field.ts';
-import { renameObject } from '#web/editor/edits/rename-object.ts';
+import { changeViaField } from '#core/board/edits/change-via-field.ts';
+import { renameObject } from '#core/board/edits/rename-object.ts';
 import type { ViaField } from '#core/board/copper.ts';
 import { QuantityField } from '#web/ui/quantity-field.tsx';
 import { SelectField } from '#web/ui/select-field.tsx';
 import { useEditor } from '../editor-context.ts';
-import { pitchOf } from '../footprint.ts';
+import { pitchOf } from '#core/board/footprint.ts';
 import { netNames } from '../net-names.ts';
-import { objectKey } from '../object-key.ts';
+import { objectKey } from '#core/board/object-key.ts';
 import { Group } from './group.tsx';
 import { NameField } from './name-field.tsx';
 import { PlaceFields } from './place-fields.tsx';

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { useEffect, useId, useMemo, useState } from 'react';
+import { useId, useMemo, useState } from 'react';
 import type { PackageModel } from '#core/board/package.ts';
 import { formatGiven, formatQuantity } from '#core/format.ts';
 import { libraryQuery } from '#web/library/library-query.ts';
@@ -13,9 +13,6 @@ type Props = { chosen: ChosenPart | null; onChoose: (part: ChosenPart) => void }
 /** Parts of the library: outline, output, limits, and where the values come from. */
 export function PartPicker({ chosen, onChoose }: Props) {
   const [open, setOpen] = useState(chosen === null);
-  useEffect(() => {
-    if (chosen === null) setOpen(true);
-  }, [chosen]);
   return (
     <>
       <button

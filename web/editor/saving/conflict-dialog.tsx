@@ -6,12 +6,18 @@ import { objectDifferences } from '../object-differences.ts';
 import type { Autosave } from './autosave.ts';
 import { dateTimeText } from './time-text.ts';
 
+type Props = {
+  autosave: Pick<Autosave, 'takeTheirs' | 'keepMine'>;
+  /** Version whose conflict was put off; null: none. */
+  postponed: number | null;
+  postpone: (version: number | null) => void;
+};
+
 /** Somebody saved meanwhile: who and when, what this page has changed, and two ways out that lose nothing. */
-export function ConflictDialog({ autosave }: { autosave: Pick<Autosave, 'takeTheirs' | 'keepMine'> }) {
+export function ConflictDialog({ autosave, postponed, postpone }: Props) {
   const save = useEditor((state) => state.save);
   const board = useEditor((state) => state.board);
   const savedBoard = useEditor((state) => state.savedBoard);
-  const [later, postpone] = useState<number | null>(null);
   const [fault, setFault] = useState<string | null>(null);
   if (save.kind !== 'conflict') return null;
   const { version, savedBy, savedAt } = save.current;
@@ -23,7 +29,7 @@ export function ConflictDialog({ autosave }: { autosave: Pick<Autosave, 'takeThe
   return (
     <Dialog
       title={`${savedBy} has saved this sketch meanwhile`}
-      open={later !== version}
+      open={postponed !== version}
       onOpenChange={(open) => postpone(open ? null : version)}
       footer={
         <>

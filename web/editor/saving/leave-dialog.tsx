@@ -12,14 +12,15 @@ export function LeaveDialog({ flush }: { flush: () => Promise<void> }) {
     ({ currentLocation, nextLocation }) =>
       currentLocation.pathname !== nextLocation.pathname && isDirty(store.getState()),
   );
-  const [asks, setAsks] = useState(false);
+  /** Where the person was going when the save failed. */
+  const [refused, setRefused] = useState<unknown>(null);
 
   useEffect(() => {
-    if (blocker.state !== 'blocked') return setAsks(false);
+    if (blocker.state !== 'blocked') return;
     let left = false;
     void flush().then(() => {
       if (left) return;
-      if (isDirty(store.getState())) setAsks(true);
+      if (isDirty(store.getState())) setRefused(blocker.location);
       else blocker.proceed();
     });
     return () => {
@@ -30,7 +31,7 @@ export function LeaveDialog({ flush }: { flush: () => Promise<void> }) {
   return (
     <Dialog
       title="Not everything is saved"
-      open={asks}
+      open={blocker.state === 'blocked' && refused === blocker.location}
       onOpenChange={(open) => !open && blocker.reset?.()}
       footer={
         <>

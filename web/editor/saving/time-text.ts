@@ -7,5 +7,7 @@ export function timeText(iso: string): string {
 
 /** Local date and time of day. */
 export function dateTimeText(iso: string): string {
-  return new Intl.DateTimeFormat(undefined, { dateStyle: 'medium', timeStyle: 'short' }).format(new Date(iso));
+  return new Intl.DateTimeFormat(undefined, { dateStyle: 'medium', timeStyle: 'short', hourCycle: 'h23' }).format(
+    new Date(iso),
+  );
 }

@@ -1,6 +1,7 @@
 import type { Point } from '#core/board/outline.ts';
 import { type EditorStore } from '../editor-store.ts';
-import { nudgeStep, tidyMm } from '../grid.ts';
+import { nudgeStep } from '../grid.ts';
+import { tidyMm } from '#core/board/edits/tidy-mm.ts';
 import { crosshairInput } from './pointer-input.ts';
 import { toolOf } from './tool-of.ts';
 

@@ -1,6 +1,6 @@
 import type { Point } from '#core/board/outline.ts';
 import type { ScreenPoint } from '../camera.ts';
-import type { ObjectKey } from '../object-key.ts';
+import type { ObjectKey } from '#core/board/object-key.ts';
 
 /** What the hand is doing. Every phase but `idle` is left by Escape without a trace. */
 export type Gesture =

@@ -1,7 +1,8 @@
 import type { Point } from '#core/board/outline.ts';
 import { type ScreenPoint, toBoard, toScreen } from '../camera.ts';
 import type { EditorState } from '../editor-store.ts';
-import { snapped, tidyMm } from '../grid.ts';
+import { snapped } from '../grid.ts';
+import { tidyMm } from '#core/board/edits/tidy-mm.ts';
 import type { PointerInput } from './gesture.ts';
 
 type Keys = { shift: boolean; alt: boolean };

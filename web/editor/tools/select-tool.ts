@@ -1,12 +1,12 @@
-import { moveObjects } from '#web/editor/edits/move-objects.ts';
-import { moveCorner } from '#web/editor/edits/move-corner.ts';
+import { moveObjects } from '#core/board/edits/move-objects.ts';
+import { moveCorner } from '#core/board/edits/move-corner.ts';
 import type { Point } from '#core/board/outline.ts';
 import { type EditorStore, commit } from '../editor-store.ts';
-import { rectangleBetween } from '../footprint.ts';
-import { tidyMm } from '../grid.ts';
+import { rectangleBetween } from '#core/board/footprint.ts';
+import { tidyMm } from '#core/board/edits/tidy-mm.ts';
 import { cornerAt, objectAt, objectsWithin } from '../hit.ts';
-import { type ObjectKey, objectKeys, objectName } from '../object-key.ts';
-import { boxOf, positionOf } from '../object-rings.ts';
+import { type ObjectKey, objectKeys, objectName } from '#core/board/object-key.ts';
+import { boxOf, positionOf } from '#core/board/object-rings.ts';
 import { type Gesture, type PointerInput, idle, movedFar, reachPx } from './gesture.ts';
 import type { Tool } from './tool.ts';
 

@@ -1,12 +1,12 @@
-import { addCutout } from '#web/editor/edits/add-cutout.ts';
-import { addHole } from '#web/editor/edits/add-hole.ts';
-import { addPour } from '#web/editor/edits/add-pour.ts';
-import { setOutline } from '#web/editor/edits/set-outline.ts';
+import { addCutout } from '#core/board/edits/add-cutout.ts';
+import { addHole } from '#core/board/edits/add-hole.ts';
+import { addPour } from '#core/board/edits/add-pour.ts';
+import { setOutline } from '#core/board/edits/set-outline.ts';
 import type { Point, Ring } from '#core/board/outline.ts';
 import { type EditorStore, commit } from '../editor-store.ts';
-import { rectangleBetween } from '../footprint.ts';
-import { freeId } from '../free-id.ts';
-import { idOf, kindOf, objectKey } from '../object-key.ts';
+import { rectangleBetween } from '#core/board/footprint.ts';
+import { freeId } from '#core/board/free-id.ts';
+import { idOf, kindOf, objectKey } from '#core/board/object-key.ts';
 import { type PointerInput, idle, movedFar, reachPx } from './gesture.ts';
 import type { Tool } from './tool.ts';
 

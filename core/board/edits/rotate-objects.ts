@@ -1,7 +1,8 @@
 import type { Board } from '#core/board/document.ts';
 import { boxOf, objectRings, positionOf } from '../object-rings.ts';
 import type { ObjectKey } from '../object-key.ts';
-import { tidyMm, transformObjects } from './transform-objects.ts';
+import { tidyMm } from './tidy-mm.ts';
+import { transformObjects } from './transform-objects.ts';
 
 /** Turns one object about its own place, several about the middle of their common box; degrees counter-clockwise. */
 export function rotateObjects(board: Board, keys: readonly ObjectKey[], byDeg: number): Board {

@@ -2,6 +2,7 @@ import type { Board } from '#core/board/document.ts';
 import type { Point, Ring } from '#core/board/outline.ts';
 import { type ObjectKey, idOf, kindOf } from '../object-key.ts';
 import { type Box, boxOf } from '../object-rings.ts';
+import { tidyMm } from './tidy-mm.ts';
 import { replaced } from './in-list.ts';
 import { withRing } from './with-ring.ts';
 
@@ -27,14 +28,9 @@ export function scaleRing(board: Board, key: ObjectKey, to: Box): Board {
 
 function placing(from: Box, to: Box): (point: Point) => Point {
   const scale = (value: number, low: number, high: number, newLow: number, newHigh: number) =>
-    high === low ? newLow : tidy(newLow + ((value - low) / (high - low)) * (newHigh - newLow));
+    high === low ? newLow : tidyMm(newLow + ((value - low) / (high - low)) * (newHigh - newLow));
   return ([x, y]) => [
     scale(x, from.left, from.right, to.left, to.right),
     scale(y, from.bottom, from.top, to.bottom, to.top),
   ];
-}
-
-/** To the nanometre. */
-function tidy(value: number): number {
-  return Math.round(value * 1e6) / 1e6;
 }

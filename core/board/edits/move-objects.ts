@@ -1,7 +1,8 @@
 import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
 import type { ObjectKey } from '../object-key.ts';
-import { tidyMm, transformObjects } from './transform-objects.ts';
+import { tidyMm } from './tidy-mm.ts';
+import { transformObjects } from './transform-objects.ts';
 
 /** Moves objects together by a distance, mm. */
 export function moveObjects(board: Board, keys: readonly ObjectKey[], [dx, dy]: Point): Board {

@@ -1,5 +1,6 @@
 import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
+import { tidyMm } from './tidy-mm.ts';
 import { type ObjectKey, idOf, kindOf } from '../object-key.ts';
 
 export type Transform = { point: (at: Point) => Point; turnDeg: number };
@@ -54,9 +55,4 @@ export function transformObjects(board: Board, keys: readonly ObjectKey[], { poi
 function plainAngle(angleDeg: number): number {
   const turned = ((angleDeg % 360) + 360) % 360;
   return tidyMm(turned > 180 ? turned - 360 : turned);
-}
-
-/** To the nanometre, so that 0.1 + 0.2 stays 0.3. */
-export function tidyMm(value: number): number {
-  return Math.round(value * 1e6) / 1e6 + 0;
 }
