@@ -3,12 +3,12 @@ import { join, resolve } from 'node:path';
 import { createInterface } from 'node:readline/promises';
 import { setTimeout as pause } from 'node:timers/promises';
 import { removeCluster, stopCluster } from '../../db/cluster/cluster.js';
+import { seedDemo } from './demo.js';
 import { clusterFolder, localFolder, projectFolder } from './local-folder.js';
 import { localSettings } from './local-settings.js';
 import { withDatabase } from './local-database.js';
 import { runningStart } from './one-start.js';
 import { prepareBuild, preparePackages } from './prepare.js';
-import { runTool } from './run-tool.js';
 
 /** What the Makefile's targets do on the local database, or on the one that DATABASE_URL names. */
 const [target, argument] = process.argv.slice(2);
@@ -21,8 +21,7 @@ async function seed() {
     const { migrateDatabase } = await import('./database.js');
     await migrateDatabase(url);
     await prepareBuild();
-    const env = { ...localSettings({ databaseUrl: url, smtpPort: 25 }), DEMO_SEED: 'yes' };
-    await runTool(process.execPath, ['--enable-source-maps', 'dist/api/seed-demo.js'], { env, show: true });
+    await seedDemo(localSettings({ databaseUrl: url, smtpPort: 25 }));
   });
   say('The demo is loaded.');
 }

@@ -1,17 +1,12 @@
-import { setTimeout as pause } from 'node:timers/promises';
-import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { freePort, isFree } from '../../db/cluster/ports.js';
-import { projectFolder } from './local-folder.js';
+import { demoSignIns, seedDemo } from './demo.js';
 import { callable, checkSettings, listenAddress, localSettings } from './local-settings.js';
 import { openLocalDatabase } from './local-database.js';
 import { claimStart } from './one-start.js';
 import { checkNode, prepareBuild, preparePackages } from './prepare.js';
-import { runTool } from './run-tool.js';
 import { untilEnded } from './until-ended.js';
 import { supervise } from './supervisor.js';
-
-const readyWithinMs = 60_000;
+import { untilReady } from './until-ready.js';
 
 /** `make start`: everything on one address, until Ctrl-C or SIGTERM. */
 await untilEnded(async ({ ending, atEnd, giveUp }) => {
@@ -31,12 +26,7 @@ await untilEnded(async ({ ending, atEnd, giveUp }) => {
     name,
     words: ['--enable-source-maps', '--import', './api/launch/end-with-parent.js', `dist/api/${file}.js`],
   });
-  if (database.isOwn) {
-    await runTool(process.execPath, ['--enable-source-maps', 'dist/api/seed-demo.js'], {
-      env: { ...env, DEMO_SEED: 'yes' },
-      signal: ending,
-    });
-  }
+  if (database.isOwn) await seedDemo(env, ending);
   if (ending.aborted) return;
 
   const programs = [program('API', 'server'), program('Worker', 'worker')];
@@ -48,17 +38,6 @@ await untilEnded(async ({ ending, atEnd, giveUp }) => {
   if (!ending.aborted) process.stdout.write(greeting(env, database.isOwn));
 });
 
-async function untilReady(url, ending) {
-  for (const began = Date.now(); Date.now() - began < readyWithinMs && !ending.aborted; await pause(100)) {
-    try {
-      if ((await fetch(url)).status === 200) return;
-    } catch {
-      // Not listening yet.
-    }
-  }
-  if (!ending.aborted) throw new Error(`The service did not become ready within ${readyWithinMs / 1000} s.`);
-}
-
 function greeting({ PUBLIC_URL: address, MAIL_SINK_FOLDER: mail }, hasDemo) {
   return [
     '',
@@ -68,13 +47,4 @@ function greeting({ PUBLIC_URL: address, MAIL_SINK_FOLDER: mail }, hasDemo) {
     'Ctrl-C ends it.',
     '',
   ].join('\n');
-}
-
-function demoSignIns() {
-  const signIns = JSON.parse(readFileSync(join(projectFolder, 'db/seeds/demo/sign-ins.json'), 'utf8'));
-  const width = (key) => Math.max(...signIns.map((one) => one[key].length));
-  return signIns.map(
-    ({ email, password, role, name }) =>
-      `  ${email.padEnd(width('email'))}  ${password.padEnd(width('password'))}  ${role.padEnd(width('role'))}  ${name}`,
-  );
 }
