@@ -9,7 +9,7 @@ const ranks = { stop: 0, warn: 1, note: 2 } as const;
 export function useFindings(): { findings: Finding[]; cautions: Caution[] } {
   const byCondition = useEditor((state) => state.checks.byCondition);
   return useMemo(() => {
-    const checks = [...byCondition.values()].filter((check) => check.fidelity === 'settled');
+    const checks = [...byCondition.values()];
     return {
       findings: merged(checks.map((check) => check.findings)).sort((a, b) => ranks[a.severity] - ranks[b.severity]),
       cautions: merged(checks.map((check) => check.cautions)),

@@ -13,6 +13,7 @@ import { LeaveDialog } from '../saving/leave-dialog.tsx';
 import { useAutosave } from '../saving/use-autosave.ts';
 import { useSolving } from '../solve/use-solving.ts';
 import { ConditionBar } from './condition-bar.tsx';
+import { LadderShelf } from './ladder-shelf.tsx';
 import { SidePanel } from './side-panel.tsx';
 import { ToolBar } from './tool-bar.tsx';
 import { ToolOptions } from './tool-options.tsx';
@@ -52,6 +53,7 @@ export function Editor({ revision, sketch, userId }: Props) {
           </section>
           <SidePanel />
         </div>
+        <LadderShelf />
       </div>
       <KeysDialog open={keysShown} onOpenChange={showKeys} />
       <ConflictDialog autosave={autosave} postponed={postponed} postpone={postpone} />
