@@ -84,9 +84,10 @@ export function commit(store: EditorStore, name: string, edit: (board: Board) =>
   const state = store.getState();
   if (state.readOnly !== null) return;
   const next = edit(state.board);
-  store.setState({ live: null, gesture: idle });
-  if (next === state.board) return;
-  store.setState({ ...kept(state, next), history: recorded(state.history, name, state.board) });
+  const ended = { live: null, gesture: idle };
+  if (next === state.board) return store.setState(ended);
+  // In one go: nobody must see the old board between the gesture and the step.
+  store.setState({ ...ended, ...kept(state, next), history: recorded(state.history, name, state.board) });
 }
 
 /** @returns name of the step that was taken back; null when there was none */

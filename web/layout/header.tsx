@@ -2,6 +2,7 @@ import { useQueryClient, useMutation } from '@tanstack/react-query';
 import { Link, useLocation, useNavigate } from 'react-router-dom';
 import type { SessionView } from '#core/contract/people.ts';
 import { paths } from '#web/paths.ts';
+import { clearDrafts } from '#web/editor/saving/draft-store.ts';
 import { call } from '#web/server/call.ts';
 import { sessionKey } from '#web/session/session-query.ts';
 import { Button } from '#web/ui/button.tsx';
@@ -19,6 +20,8 @@ export function Header({ session }: { session: SessionView }) {
     mutationFn: () => call('signOut'),
     onSuccess: async () => {
       await navigate(paths.signIn(), { state: { signedOut: true } });
+      // What this device has kept of sketches belongs to who signed out.
+      await clearDrafts();
       client.clear();
       client.setQueryData(sessionKey, null);
     },

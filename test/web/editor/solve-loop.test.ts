@@ -93,6 +93,9 @@ test('solving – many moves while one preview runs – one at a time, the newes
   expect(fidelity()).toBe('preview');
   expect(full).toHaveLength(2);
   hand.release([22, 12]);
+  expect(coarse[3]?.board).toBe(hand.board());
+  await coarse[3]?.answer();
+  expect(fidelity()).toBe('refined');
   expect(full[2]).toMatchObject({ condition: 'Hot', cellMm: null });
   await full[2]?.answer();
   expect(fidelity()).toBe('settled');

@@ -6,8 +6,11 @@ import type { HeatField } from '#core/thermal/heat-field.ts';
 export type ConditionCheck = {
   /** The board that it belongs to. */
   board: Board;
-  /** `preview`: coarse cells while something is being moved; `settled`: the cell that the server uses as well. */
-  fidelity: 'preview' | 'settled';
+  /**
+   * `preview`: coarse cells while something is being moved; `refined`: finer ones right after;
+   * `settled`: the cell that the server uses as well.
+   */
+  fidelity: 'preview' | 'refined' | 'settled';
   condition: ConditionResult;
   field: HeatField | null;
   findings: readonly Finding[];

@@ -1,6 +1,6 @@
 import type { Board } from '#core/board/document.ts';
 import { type EditorState, type EditorStore, shownBoard } from '../editor-store.ts';
-import { conditionCheck, isCurrent, withCheck } from './checks.ts';
+import { type ConditionCheck, conditionCheck, isCurrent, withCheck } from './checks.ts';
 import { previewCellMm } from './preview-cell.ts';
 import type { SolveAnswer } from './solve.worker.ts';
 
@@ -8,59 +8,60 @@ export type Solve = (board: Board, condition: string, cellMm: number | null) => 
 /** Two places to calculate, so that a long settled calculation never keeps a preview waiting. */
 export type Solvers = { preview: Solve; settled: Solve };
 
-type Fidelity = keyof Solvers;
-type Job = { board: Board; condition: string };
+type Lane = keyof Solvers;
+type Fidelity = ConditionCheck['fidelity'];
+type Job = { board: Board; condition: string; fidelity: Fidelity };
 
 /**
- * Keeps the temperatures up with the board: coarse for the active condition as soon as anything changes, then, once no
- * gesture is under way, every condition with the normal cell, the active one first. One calculation of each kind at a
+ * Keeps the temperatures up with the board: coarse for the active condition while something is moved, finer as soon as
+ * it rests, and at last every condition with the normal cell, the active one first. One calculation in each place at a
  * time; the newest board wins.
  * @returns function that ends it
  */
 export function startSolving(store: EditorStore, solvers: Solvers): () => void {
-  const running = new Set<Fidelity>();
+  const running = new Set<Lane>();
   let stopped = false;
   /** Boards and conditions that could not be calculated, so that they are not tried without end. */
-  const refused: Record<Fidelity, WeakMap<Board, Set<string>>> = { preview: new WeakMap(), settled: new WeakMap() };
+  const refused: Record<Lane, WeakMap<Board, Set<string>>> = { preview: new WeakMap(), settled: new WeakMap() };
 
-  const isOpen = (fidelity: Fidelity, { board, condition }: Job) => {
+  const isOpen = (lane: Lane, { board, condition, fidelity }: Job) => {
     const check = store.getState().checks.byCondition.get(condition);
-    const isDone = check?.board === board && (fidelity === 'preview' || check.fidelity === 'settled');
-    return !isDone && !refused[fidelity].get(board)?.has(condition);
+    const isDone = check?.board === board && ranks[check.fidelity] >= ranks[fidelity];
+    return !isDone && !refused[lane].get(board)?.has(condition);
   };
 
-  const run = async (fidelity: Fidelity): Promise<void> => {
-    if (running.has(fidelity) || stopped) return;
-    running.add(fidelity);
-    const next = () => jobs[fidelity](store.getState()).find((job) => isOpen(fidelity, job));
+  const run = async (lane: Lane): Promise<void> => {
+    if (running.has(lane) || stopped) return;
+    running.add(lane);
+    const next = () => jobs[lane](store.getState()).find((job) => isOpen(lane, job));
     for (let job = next(); job && !stopped; job = next()) {
       tell();
-      await perform(fidelity, job);
+      await perform(lane, job);
     }
-    running.delete(fidelity);
+    running.delete(lane);
     tell();
   };
 
-  const perform = async (fidelity: Fidelity, job: Job): Promise<void> => {
+  const perform = async (lane: Lane, job: Job): Promise<void> => {
+    const { board, condition, fidelity } = job;
     try {
-      const cellMm = fidelity === 'preview' ? previewCellMm(job.board) : null;
-      const { result, field } = await solvers[fidelity](job.board, job.condition, cellMm);
-      const check = conditionCheck(job.board, fidelity, job.condition, result, field);
-      if (!check) return refuse(fidelity, job, 'the condition is not in the result');
+      const { result, field } = await solvers[lane](board, condition, cellOf(job));
+      const check = conditionCheck(board, fidelity, condition, result, field);
+      if (!check) return refuse(lane, job, 'the condition is not in the result');
       if (stopped) return;
       store.setState((state) => {
-        const present = state.checks.byCondition.get(job.condition);
+        const present = state.checks.byCondition.get(condition);
         // A preview that comes late must not take the place of the full answer.
-        if (fidelity === 'preview' && present && isCurrent(present, shownBoard(state))) return {};
-        return { checks: withCheck(state.checks, job.condition, check) };
+        if (lane === 'preview' && present && isCurrent(present, shownBoard(state))) return {};
+        return { checks: withCheck(state.checks, condition, check) };
       });
     } catch (error) {
-      refuse(fidelity, job, error instanceof Error ? error.message : String(error));
+      refuse(lane, job, error instanceof Error ? error.message : String(error));
     }
   };
 
-  const refuse = (fidelity: Fidelity, { board, condition }: Job, fault: string): void => {
-    refused[fidelity].set(board, (refused[fidelity].get(board) ?? new Set()).add(condition));
+  const refuse = (lane: Lane, { board, condition }: Job, fault: string): void => {
+    refused[lane].set(board, (refused[lane].get(board) ?? new Set()).add(condition));
     if (!stopped) store.setState(({ checks }) => ({ checks: { ...checks, fault } }));
   };
 
@@ -85,13 +86,21 @@ export function startSolving(store: EditorStore, solvers: Solvers): () => void {
   };
 }
 
-const jobs: Record<Fidelity, (state: EditorState) => Job[]> = {
-  preview: (state) =>
-    state.activeCondition === null ? [] : [{ board: shownBoard(state), condition: state.activeCondition }],
+const ranks: Record<Fidelity, number> = { preview: 0, refined: 1, settled: 2 };
+
+const jobs: Record<Lane, (state: EditorState) => Job[]> = {
+  preview({ board, live, activeCondition: condition }) {
+    if (condition === null) return [];
+    return [live ? { board: live, condition, fidelity: 'preview' } : { board, condition, fidelity: 'refined' }];
+  },
   settled({ board, live, activeCondition }) {
     if (live) return [];
     const names = board.conditions.map((condition) => condition.name);
     const ordered = [...names].sort((a, b) => Number(b === activeCondition) - Number(a === activeCondition));
-    return ordered.map((condition) => ({ board, condition }));
+    return ordered.map((condition) => ({ board, condition, fidelity: 'settled' }));
   },
 };
+
+function cellOf({ board, fidelity }: Job): number | null {
+  return fidelity === 'settled' ? null : previewCellMm(board, fidelity);
+}
