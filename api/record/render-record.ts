@@ -8,6 +8,8 @@ import { ensure, openSheet, write, type Paper, type Sheet } from './sheet.ts';
 
 /** Date of a document that belongs to no revision: fixed, as the record must not depend on when it is printed. */
 const undated = new Date('2000-01-01T00:00:00Z');
+/** Height that a drawing with its legend may take, points. */
+const roomForDrawing = 350;
 
 /**
  * The record as a PDF: light, readable in grey, fonts embedded, text selectable, sections as bookmarks.
