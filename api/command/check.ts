@@ -8,7 +8,6 @@ import { BoardTooLarge } from '#core/thermal/cell-grid.ts';
 import { exitCodes } from './exit-codes.ts';
 import { print, printError } from './print.ts';
 import { readInput } from './read-input.ts';
-import { recordOfDocument } from './record-of-document.ts';
 import { resultTable } from './result-table.ts';
 
 const finestCellMm = 0.05;
@@ -43,7 +42,11 @@ export async function check(words: readonly string[]): Promise<number> {
       gridError: true,
       now: () => performance.now(),
     });
-    if (options.pdf !== undefined) await writeFile(options.pdf, await recordOfDocument(board, result, fields));
+    if (options.pdf !== undefined) {
+      // Loaded only when asked for: most runs need no PDF.
+      const { recordOfDocument } = await import('./record-of-document.ts');
+      await writeFile(options.pdf, await recordOfDocument(board, result, fields));
+    }
     await print(options.table ? resultTable(board, result) : `${JSON.stringify(result, null, 2)}\n`);
     return exitCodeOf(board, result);
   } catch (error) {
