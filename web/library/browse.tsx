@@ -14,7 +14,7 @@ export function Browse({ label, entries, shown, onShow, children }: Props) {
   const open = entries.find(({ key }) => key === shown) ?? entries[0];
   if (!open) return <p className="py-6 text-ink-soft">The library holds none of these.</p>;
   return (
-    <div className="grid gap-x-10 gap-y-8 md:grid-cols-[17rem_1fr]">
+    <div className="grid gap-x-8 gap-y-8 lg:gap-x-10 md:grid-cols-[12rem_1fr] lg:grid-cols-[17rem_1fr]">
       <ul aria-label={label} className="max-h-64 overflow-y-auto border-t border-line md:max-h-[70dvh]">
         {entries.map(({ key, name, note }) => (
           <li key={key} className="border-b border-line">

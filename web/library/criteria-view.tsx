@@ -34,14 +34,14 @@ function Rules({ set }: { set: Criteria }) {
         {set.rules.map((rule, index) => (
           <Row key={index}>
             <Cell className="font-semibold">{quantityWords[rule.quantity]}</Cell>
-            <Cell className="min-w-44">
+            <Cell className="min-w-32">
               {comparisons(rule).map((text) => (
                 <span key={text} className="block">
                   {text}
                 </span>
               ))}
             </Cell>
-            <Cell className="min-w-56 text-sm">
+            <Cell className="min-w-40 text-sm">
               {citation(rule)}
               {rule.source ? <span className="block text-ink-soft">{rule.source}</span> : null}
             </Cell>
