@@ -55,7 +55,7 @@ export function BarCheck({
         type="checkbox"
         checked={checked}
         onChange={(event) => onChange(event.target.checked)}
-        className="size-5 accent-copper"
+        className="size-6 accent-copper"
       />
       {label}
     </label>

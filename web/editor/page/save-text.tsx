@@ -25,7 +25,7 @@ export function SaveText({ retry, decide }: SaveActs) {
   }, [isTrouble, text]);
   if (readOnly !== null) {
     return (
-      <p className="max-w-72 text-xs leading-tight">
+      <p className="text-sm">
         <strong>Read only.</strong> {readOnly}
       </p>
     );

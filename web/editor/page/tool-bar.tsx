@@ -32,13 +32,12 @@ export function ToolBar({ showKeys, ...saveActs }: { showKeys: () => void } & Sa
           aria-label="Tool"
           className="contents"
         >
-          {groups.map((group, index) => (
+          {(mayEdit ? groups : groups.slice(0, 1)).map((group, index) => (
             <div key={group[0]} className={classes('flex flex-wrap', index > 0 && 'border-l border-line pl-1')}>
               {group.map((name) => (
                 <Toolbar.ToggleItem
                   key={name}
                   value={name}
-                  disabled={!mayEdit && name !== 'select' && name !== 'hand'}
                   title={`${toolWords[name].label} (${toolWords[name].key.toUpperCase()})`}
                   className={itemClass}
                 >
@@ -49,24 +48,26 @@ export function ToolBar({ showKeys, ...saveActs }: { showKeys: () => void } & Sa
             </div>
           ))}
         </Toolbar.ToggleGroup>
-        <div className="flex border-l border-line pl-1">
-          <Toolbar.Button
-            className={itemClass}
-            disabled={!mayEdit || undoable === null}
-            title={undoable ? `Undo: ${undoable} (Ctrl+Z)` : 'Nothing to undo'}
-            onClick={() => commands.undo.run(store)}
-          >
-            Undo
-          </Toolbar.Button>
-          <Toolbar.Button
-            className={itemClass}
-            disabled={!mayEdit || redoable === null}
-            title={redoable ? `Redo: ${redoable} (Ctrl+Shift+Z)` : 'Nothing to redo'}
-            onClick={() => commands.redo.run(store)}
-          >
-            Redo
-          </Toolbar.Button>
-        </div>
+        {mayEdit ? (
+          <div className="flex border-l border-line pl-1">
+            <Toolbar.Button
+              className={itemClass}
+              disabled={undoable === null}
+              title={undoable ? `Undo: ${undoable} (Ctrl+Z)` : 'Nothing to undo'}
+              onClick={() => commands.undo.run(store)}
+            >
+              Undo
+            </Toolbar.Button>
+            <Toolbar.Button
+              className={itemClass}
+              disabled={redoable === null}
+              title={redoable ? `Redo: ${redoable} (Ctrl+Shift+Z)` : 'Nothing to redo'}
+              onClick={() => commands.redo.run(store)}
+            >
+              Redo
+            </Toolbar.Button>
+          </div>
+        ) : null}
         <div className="flex border-l border-line pl-1">
           <Toolbar.Button className={itemClass} title="Keys (?)" onClick={showKeys}>
             Keys
