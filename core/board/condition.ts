@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { name, objectId, title } from './name.ts';
 import { power } from './placement.ts';
-import { quantity } from './quantity.ts';
+import { quantity, shown } from './quantity.ts';
 
 const voltage = quantity('V', 0, 2000);
 
@@ -35,7 +35,10 @@ export const condition = z.strictObject({
   air,
   /** Fixed total film coefficient per face; replaces convection and radiation on the board and on case tops. */
   filmWPerM2K: z
-    .union([film, z.strictObject({ top: film, bottom: film })])
+    .union([film, z.strictObject({ top: film, bottom: film })], {
+      error: (issue) =>
+        `must be a number from 0.1 to 100000 W/(m²·K) or { "top", "bottom" }, found ${shown(issue.input)}`,
+    })
     .nullable()
     .default(null),
   /** Voltage by supply; a supply not named stands at its maximum. */

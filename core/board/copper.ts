@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { name, objectId } from './name.ts';
 import { point, ring } from './outline.ts';
-import { count, quantity } from './quantity.ts';
+import { count, quantity, shown } from './quantity.ts';
 import { coverage, emissivity } from './stackup.ts';
 
 /** Copper of one net on one layer. Where pours of one net overlap they count once, the highest coverage rules. */
@@ -25,7 +25,9 @@ export const viaField = z.strictObject({
   at: point,
   columns: count(1, 200),
   rows: count(1, 200),
-  pitchMm: z.union([pitch, z.tuple([pitch, pitch])], { error: 'must be a pitch from 0.1 to 100 mm or [x, y]' }),
+  pitchMm: z.union([pitch, z.tuple([pitch, pitch])], {
+    error: (issue) => `must be a pitch from 0.1 to 100 mm or [x, y], found ${shown(issue.input)}`,
+  }),
   rotationDeg: quantity('°', -360, 360).default(0),
   drillMm: quantity('mm', 0.05, 10),
   platingUm: quantity('µm', 1, 200),
@@ -42,7 +44,7 @@ export const sink = z.strictObject({
   layer: name,
   conductanceWPerK: quantity('W/K', 0, 1000),
   toC: z.union([z.literal('ambient'), quantity('°C', -100, 300)], {
-    error: 'must be "ambient" or a temperature from -100 to 300 °C',
+    error: (issue) => `must be "ambient" or a temperature from -100 to 300 °C, found ${shown(issue.input)}`,
   }),
 });
 

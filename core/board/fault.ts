@@ -27,24 +27,48 @@ export function faultsOf(error: z.ZodError): FieldFault[] {
 }
 
 function message(issue: z.core.$ZodIssue): string {
-  const missing = 'input' in issue && issue.input === undefined;
   // Messages of our own schemas begin in lower case and stay; only zod's own words are replaced.
   const own = !/^(Invalid|Too)/.test(issue.message);
-  if (own) return missing ? `is missing; it ${issue.message.replace(/, found nothing$/, '')}` : issue.message;
-  if (issue.code === 'invalid_value') {
-    return `must be one of ${issue.values.map((value) => shown(value)).join(', ')}, found ${shown(issue.input)}`;
+  const input = 'discriminator' in issue ? fieldOf(issue.input, String(issue.discriminator)) : issue.input;
+  if (input === undefined) {
+    return `is missing; it ${own ? issue.message.replace(/, found nothing$/, '') : allowed(issue)}`;
   }
-  if (issue.code === 'invalid_type') {
-    return missing
-      ? `is missing; it must be ${kind(issue.expected)}`
-      : `must be ${kind(issue.expected)}, found ${shown(issue.input)}`;
-  }
-  if (issue.code === 'invalid_union') return `has no valid kind: ${issue.message}`;
-  if (issue.code === 'too_big') return `must have at most ${issue.maximum} entries`;
-  if (issue.code === 'too_small') return `must have at least ${issue.minimum} entries`;
-  return issue.message;
+  if (own) return issue.message;
+  const found = issue.code === 'too_big' || issue.code === 'too_small' ? '' : `, found ${shown(input)}`;
+  return allowed(issue) + found;
 }
 
+const fieldOf = (value: unknown, key: string): unknown =>
+  value !== null && typeof value === 'object' ? (value as Record<string, unknown>)[key] : value;
+
+function allowed(issue: z.core.$ZodIssue): string {
+  switch (issue.code) {
+    case 'invalid_value':
+      return `must be ${oneOf(issue.values)}`;
+    case 'invalid_type':
+      return `must be ${kind(issue.expected)}`;
+    case 'invalid_union':
+      return 'options' in issue && Array.isArray(issue.options)
+        ? `must be ${oneOf(issue.options)}`
+        : 'has no valid form';
+    case 'too_big':
+      return `must have at most ${issue.maximum} ${issue.maximum === 1 ? 'entry' : 'entries'}`;
+    case 'too_small':
+      return `must have at least ${issue.minimum} ${issue.minimum === 1 ? 'entry' : 'entries'}`;
+    default:
+      return issue.message;
+  }
+}
+
+const oneOf = (values: readonly unknown[]) =>
+  values.length === 1 ? shown(values[0]) : `one of ${values.map((value) => shown(value)).join(', ')}`;
+
 const kind = (expected: string) =>
-  ({ object: 'an object', record: 'an object', array: 'a list', string: 'text', tuple: 'a list' })[expected] ??
-  expected;
+  ({
+    object: 'an object',
+    record: 'an object',
+    array: 'a list',
+    string: 'text',
+    tuple: 'a list',
+    boolean: 'true or false',
+  })[expected] ?? expected;

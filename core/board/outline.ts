@@ -1,9 +1,9 @@
 import { z } from 'zod';
-import { quantity } from './quantity.ts';
+import { quantity, shown } from './quantity.ts';
 
 /** A point in mm: x to the right, y up, board seen from the top. */
 export const point = z.tuple([quantity('mm', -2000, 2000), quantity('mm', -2000, 2000)], {
-  error: 'must be a point [x, y] in mm',
+  error: (issue) => `must be a point [x, y] in mm, found ${shown(issue.input)}`,
 });
 /** A closed ring in mm, last point joined to the first; either sense of rotation. */
 export const ring = z

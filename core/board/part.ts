@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { name, source } from './name.ts';
-import { quantity } from './quantity.ts';
+import { quantity, shown } from './quantity.ts';
 
 const current = quantity('A', 0, 200);
 const voltage = quantity('V', 0, 2000);
@@ -8,7 +8,7 @@ const voltage = quantity('V', 0, 2000);
 /** Output current → value, straight between the points, constant beyond the last; currents rising. */
 const currentTable = (value: typeof current) =>
   z
-    .array(z.tuple([current, value]))
+    .array(z.tuple([current, value], { error: (issue) => `must be a pair [A, value], found ${shown(issue.input)}` }))
     .min(1)
     .max(100);
 

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { name, objectId } from './name.ts';
 import { point } from './outline.ts';
-import { quantity } from './quantity.ts';
+import { quantity, shown } from './quantity.ts';
 
 export const side = z.enum(['top', 'bottom']);
 const rotationDeg = quantity('°', -360, 360);
@@ -10,7 +10,7 @@ export const power = quantity('W', 0, 500);
 
 /** What a regulator is fed from: a supply, or another regulator's output. */
 export const feed = z.union([z.strictObject({ supply: name }), z.strictObject({ regulator: objectId })], {
-  error: 'must be { "supply": name } or { "regulator": ref }',
+  error: (issue) => `must be { "supply": name } or { "regulator": ref }, found ${shown(issue.input)}`,
 });
 
 /** Series resistor and/or diode between feed and regulator; `source` names the heat source on the board that it heats. */

@@ -1,8 +1,9 @@
-import { polygonArea, polygonContains } from '#core/geometry/polygon.ts';
+import { polygonArea } from '#core/geometry/polygon.ts';
 import { isSimplePolygon } from '#core/geometry/ring-checks.ts';
 import type { Report } from '../cross-check.ts';
 import type { Board } from '../document.ts';
 import type { Ring } from '../outline.ts';
+import { ringInside } from './ring-inside.ts';
 
 /** A ring that encloses less than this encloses nothing that could be made, mm². */
 const leastAreaMm2 = 1e-4;
@@ -14,7 +15,7 @@ export function checkGeometry(board: Board, report: Report) {
     else if (!isSimplePolygon(ring)) report(path, 'must not cross or touch itself');
   };
   const within = (path: readonly PropertyKey[], ring: Ring, outer: Ring, what: string) => {
-    if (!ring.every(([x, y]) => polygonContains(outer, x, y))) report(path, `must lie inside ${what}`);
+    if (!ringInside(ring, outer)) report(path, `must lie inside ${what}`);
   };
   simple(['outline', 'points'], board.outline.points);
   board.outline.cutouts.forEach((cutout, i) => {

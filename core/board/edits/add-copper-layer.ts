@@ -1,20 +1,26 @@
 import type { Board } from '#core/board/document.ts';
 import { freeId } from '../free-id.ts';
 
-/** A bare copper layer below the last one, with a laminate like the last between them. */
-export function addCopperLayer(board: Board): Board {
+const usualLaminate = { thicknessMm: 1.5, inPlaneWPerMK: 0.9, throughWPerMK: 0.3 };
+
+/**
+ * A bare copper layer below the one at `index` (the last when left out), as thick as that one, with a laminate like its
+ * neighbour's between them.
+ */
+export function addCopperLayer(board: Board, index: number = board.stackup.copper.length - 1): Board {
   const { copper, dielectric } = board.stackup;
-  const last = copper.at(-1);
   const name = freeId(
     'L',
     copper.map((layer) => layer.name),
   );
+  const layer = { name, thicknessUm: copper[index]?.thicknessUm ?? 35, plane: null, traces: null };
+  const laminate = dielectric[index] ?? dielectric.at(-1) ?? usualLaminate;
   return {
     ...board,
     stackup: {
       ...board.stackup,
-      copper: [...copper, { name, thicknessUm: last?.thicknessUm ?? 35, plane: null, traces: null }],
-      dielectric: [...dielectric, dielectric.at(-1) ?? { thicknessMm: 1.5, inPlaneWPerMK: 0.9, throughWPerMK: 0.3 }],
+      copper: copper.toSpliced(index + 1, 0, layer),
+      dielectric: dielectric.toSpliced(index, 0, laminate),
     },
   };
 }

@@ -1,42 +1,64 @@
+import type { Condition } from '#core/board/condition.ts';
 import type { Board } from '#core/board/document.ts';
-import type { Dropper } from '#core/board/placement.ts';
+import type { Dropper, Regulator } from '#core/board/placement.ts';
 import { type ObjectKey, idOf, kindOf } from '../object-key.ts';
+import { replaced, without } from './in-list.ts';
+import { withoutKeys } from './keyed.ts';
 
-/** Removes objects and what was said about them in the conditions; feeds that named them become not stated. The outline cannot go. */
+/**
+ * Removes objects and what was said about them in the conditions; feeds that named them become not stated. The outline
+ * cannot go. What is not touched stays the very same.
+ */
 export function deleteObjects(board: Board, keys: readonly ObjectKey[]): Board {
   const ids = (kind: string) => new Set(keys.filter((key) => kindOf(key) === kind).map(idOf));
-  const without = <T>(list: T[], kind: string, id: (item: T, index: number) => string): T[] => {
-    const gone = ids(kind);
-    return gone.size === 0 ? list : list.filter((item, index) => !gone.has(id(item, index)));
-  };
-  const regulators = ids('regulator');
-  const sources = ids('source');
+  const [regulators, sources, cutouts] = [ids('regulator'), ids('source'), ids('cutout')];
+  const [pours, viaFields, sinks, probes] = [ids('pour'), ids('via-field'), ids('sink'), ids('probe')];
+  const kept = without(board.regulators, (item) => regulators.has(item.ref));
   return {
     ...board,
-    regulators: without(board.regulators, 'regulator', (item) => item.ref).map((item) => ({
-      ...item,
-      feed: item.feed && 'regulator' in item.feed && regulators.has(item.feed.regulator) ? null : item.feed,
-      dropper: item.dropper?.source && sources.has(item.dropper.source) ? withoutSource(item.dropper) : item.dropper,
-    })),
-    sources: without(board.sources, 'source', (item) => item.ref),
-    pours: without(board.pours, 'pour', (item) => item.id),
-    viaFields: without(board.viaFields, 'via-field', (item) => item.id),
-    sinks: without(board.sinks, 'sink', (item) => item.id),
-    probes: without(board.probes, 'probe', (item) => item.id),
-    outline: { ...board.outline, cutouts: without(board.outline.cutouts, 'cutout', (_, index) => String(index)) },
-    conditions: board.conditions.map((condition) => ({
-      ...condition,
-      loadsA: withoutKeys(condition.loadsA, regulators),
-      powersW: withoutKeys(condition.powersW, sources),
-      fault: condition.fault?.kind === 'output-short' && regulators.has(condition.fault.ref) ? null : condition.fault,
-    })),
+    regulators: replaced(
+      kept,
+      () => true,
+      (item) => freed(item, regulators, sources),
+    ),
+    sources: without(board.sources, (item) => sources.has(item.ref)),
+    pours: without(board.pours, (item) => pours.has(item.id)),
+    viaFields: without(board.viaFields, (item) => viaFields.has(item.id)),
+    sinks: without(board.sinks, (item) => sinks.has(item.id)),
+    probes: without(board.probes, (item) => probes.has(item.id)),
+    outline:
+      cutouts.size === 0
+        ? board.outline
+        : { ...board.outline, cutouts: without(board.outline.cutouts, (_, index) => cutouts.has(String(index))) },
+    conditions: replaced(
+      board.conditions,
+      () => true,
+      (item) => forgetting(item, regulators, sources),
+    ),
   };
+}
+
+type Gone = ReadonlySet<string>;
+
+function freed(item: Regulator, regulators: Gone, sources: Gone): Regulator {
+  const fedByGone = item.feed !== null && 'regulator' in item.feed && regulators.has(item.feed.regulator);
+  const heatsGone = item.dropper?.source !== undefined && sources.has(item.dropper.source);
+  if (!fedByGone && !heatsGone) return item;
+  return {
+    ...item,
+    feed: fedByGone ? null : item.feed,
+    dropper: heatsGone && item.dropper ? withoutSource(item.dropper) : item.dropper,
+  };
+}
+
+function forgetting(item: Condition, regulators: Gone, sources: Gone): Condition {
+  const loadsA = withoutKeys(item.loadsA, regulators);
+  const powersW = withoutKeys(item.powersW, sources);
+  const fault = item.fault?.kind === 'output-short' && regulators.has(item.fault.ref) ? null : item.fault;
+  if (loadsA === item.loadsA && powersW === item.powersW && fault === item.fault) return item;
+  return { ...item, loadsA, powersW, fault };
 }
 
 function withoutSource({ resistanceOhm, dropV }: Dropper): Dropper {
   return { ...(resistanceOhm !== undefined && { resistanceOhm }), ...(dropV !== undefined && { dropV }) };
-}
-
-function withoutKeys(record: Record<string, number>, gone: ReadonlySet<string>): Record<string, number> {
-  return Object.fromEntries(Object.entries(record).filter(([key]) => !gone.has(key)));
 }

@@ -9,3 +9,9 @@ export function replaced<T>(list: readonly T[], isMeant: (item: T) => boolean, c
   });
   return changed ? next : (list as T[]);
 }
+
+/** The list without the items that are meant; the very same list when there is none. */
+export function without<T>(list: readonly T[], isMeant: (item: T, index: number) => boolean): T[] {
+  const kept = list.filter((item, index) => !isMeant(item, index));
+  return kept.length === list.length ? (list as T[]) : kept;
+}

@@ -1,6 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import { type ObjectKey, idOf, kindOf, objectKeys } from '../object-key.ts';
 import { replaced } from './in-list.ts';
+import { renamedKey } from './keyed.ts';
 
 /** Another reference or id, followed by everything that names the object. The same board where the name is taken. */
 export function renameObject(board: Board, key: ObjectKey, name: string): Board {
@@ -10,19 +11,23 @@ export function renameObject(board: Board, key: ObjectKey, name: string): Board 
     case 'regulator':
       return {
         ...board,
-        regulators: board.regulators.map((item) => ({
-          ...item,
-          ref: item.ref === id ? name : item.ref,
-          feed: item.feed && 'regulator' in item.feed && item.feed.regulator === id ? { regulator: name } : item.feed,
-        })),
-        conditions: board.conditions.map((condition) => ({
-          ...condition,
-          loadsA: renamedKey(condition.loadsA, id, name),
-          fault:
-            condition.fault?.kind === 'output-short' && condition.fault.ref === id
-              ? { ...condition.fault, ref: name }
-              : condition.fault,
-        })),
+        regulators: replaced(
+          board.regulators,
+          (item) => item.ref === id || (item.feed !== null && 'regulator' in item.feed && item.feed.regulator === id),
+          (item) => (item.ref === id ? { ...item, ref: name } : { ...item, feed: { regulator: name } }),
+        ),
+        conditions: replaced(
+          board.conditions,
+          ({ loadsA, fault }) => id in loadsA || (fault?.kind === 'output-short' && fault.ref === id),
+          (condition) => ({
+            ...condition,
+            loadsA: renamedKey(condition.loadsA, id, name),
+            fault:
+              condition.fault?.kind === 'output-short' && condition.fault.ref === id
+                ? { ...condition.fault, ref: name }
+                : condition.fault,
+          }),
+        ),
       };
     case 'source':
       return {
@@ -37,10 +42,11 @@ export function renameObject(board: Board, key: ObjectKey, name: string): Board 
           (item) => item.dropper?.source === id,
           (item) => ({ ...item, dropper: item.dropper && { ...item.dropper, source: name } }),
         ),
-        conditions: board.conditions.map((condition) => ({
-          ...condition,
-          powersW: renamedKey(condition.powersW, id, name),
-        })),
+        conditions: replaced(
+          board.conditions,
+          (condition) => id in condition.powersW,
+          (condition) => ({ ...condition, powersW: renamedKey(condition.powersW, id, name) }),
+        ),
       };
     case 'pour':
       return {
@@ -81,8 +87,4 @@ export function renameObject(board: Board, key: ObjectKey, name: string): Board 
     default:
       return board;
   }
-}
-
-function renamedKey(record: Record<string, number>, from: string, to: string): Record<string, number> {
-  return Object.fromEntries(Object.entries(record).map(([key, value]) => [key === from ? to : key, value]));
 }
