@@ -82,6 +82,24 @@ export async function membersWithRole(database: Database, teamId: string, roles:
   return rows.map(member);
 }
 
+/** Those of some people who are still members. */
+export async function presentMembers(
+  database: Database,
+  teamId: string,
+  people: readonly { id: string }[],
+): Promise<Member[]> {
+  const rows = await database('members')
+    .where({ team_id: teamId })
+    .whereNull('removed_at')
+    .whereIn(
+      'id',
+      people.map(({ id }) => id),
+    )
+    .orderBy(['name', 'id'])
+    .select<Row[]>('*');
+  return rows.map(member);
+}
+
 /** Locks the team's present members, so that the last administrator cannot be lost to two changes at once. */
 export async function lockPresentMembers(database: Database, teamId: string): Promise<Member[]> {
   const rows = await database('members')

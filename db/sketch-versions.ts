@@ -59,3 +59,10 @@ function selected(database: Database) {
     .join('members as m', 'm.id', 's.saved_by')
     .select('s.version', 's.saved_at', 's.saved_by', 'm.name', 's.board_hash');
 }
+
+export async function countConditions(database: Database, revisionId: string, number: number): Promise<number> {
+  const rows = await database('sketch_versions')
+    .where({ revision_id: revisionId, version: number })
+    .select<{ count: number }[]>(database.raw("jsonb_array_length(board->'conditions') as count"));
+  return only(rows).count;
+}

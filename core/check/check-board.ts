@@ -61,7 +61,7 @@ export function checkBoard(board: Board, assumptions: readonly Assumption[], opt
       format: 'dropwatt-result',
       version: 1,
       method: methodVersion,
-      inputHash: hashBoard(board),
+      inputHash: hashBoard(board, assumptions),
       title: board.title,
       conditions: checked.map(({ result }) => result),
       findings: findAll(context),
