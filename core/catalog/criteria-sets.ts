@@ -72,7 +72,7 @@ export const criteriaSets: readonly Criteria[] = [
         atMostC: 110,
         document: 'RFI TC.PATC SR CM 03 M 69',
         revision: 'F',
-        clause: 'vol. 3 App. B',
+        clause: 'vol. 3 App. B, digital integrated circuits',
         mark: 'read',
       },
     ],

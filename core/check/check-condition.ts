@@ -8,6 +8,7 @@ import type { ConditionResult, SourceResult } from '#core/result/result.ts';
 import type { BoardModel } from '#core/thermal/board-model.ts';
 import { modelErrorShareOf } from '#core/thermal/method.ts';
 import type { ThermalSolution } from '#core/thermal/solution.ts';
+import { heatInput } from './heat-input.ts';
 import { regulatorResult } from './regulator-result.ts';
 import { solveWithShutdown } from './solve-with-shutdown.ts';
 
@@ -26,12 +27,13 @@ export function checkCondition(
   const began = options.now?.() ?? 0;
   const { board } = model;
   const points = operatingPoints(board, condition);
-  const regulatorsW = new Map<string, number>();
-  for (const point of points.values()) if (point.dissipationW !== null) regulatorsW.set(point.ref, point.dissipationW);
-  const sourcesW = sourcePowers(board, condition, points);
-  const { solution, powers, cycling } = solveWithShutdown(model, condition, { regulatorsW, sourcesW }, options);
+  const powersW = sourcePowers(board, condition, points);
+  const { solution, powers, cycling } = solveWithShutdown(model, condition, heatInput(points, powersW), options);
   const usable = solution.status === 'converged';
-  const complete = usable && [...points.values()].every((point) => point.missing.length === 0);
+  const complete =
+    usable &&
+    [...powersW.values()].every((power) => power !== null) &&
+    [...points.values()].every((point) => point.missing.length === 0);
   const regulators = board.regulators.map((regulator) => {
     const point = points.get(regulator.ref)!;
     const power = powers.get(regulator.ref) ?? point.dissipationW;
@@ -45,7 +47,7 @@ export function checkCondition(
       complete,
     });
   });
-  const sources = sourceResults(model, condition, solution, sourcesW, complete);
+  const sources = sourceResults(model, condition, solution, powersW, complete);
   const judged = [
     ...regulators.map((regulator) => regulator.verdict),
     ...sources.filter((source) => source.limitC !== null).map((source) => source.verdict),
@@ -73,7 +75,7 @@ function sourceResults(
   model: BoardModel,
   condition: Condition,
   solution: ThermalSolution,
-  sourcesW: ReadonlyMap<string, number>,
+  powersW: ReadonlyMap<string, number | null>,
   complete: boolean,
 ): SourceResult[] {
   return model.board.sources.map((source) => {
@@ -86,7 +88,7 @@ function sourceResults(
         : verdictOf(temperatureC, source.limitC, Math.abs(rise) * modelErrorShareOf(condition));
     return {
       ref: source.ref,
-      powerW: sourcesW.get(source.ref) ?? 0,
+      powerW: powersW.get(source.ref) ?? null,
       temperatureC,
       maxC: found && Number.isFinite(found.maxC) ? found.maxC : null,
       limitC: source.limitC,

@@ -14,6 +14,9 @@ const thresholds: readonly { time: string; metal: number; glass: number; plastic
   { time: 'some minutes', metal: 49, glass: 59, plastic: 74 },
 ];
 
+/** The source of the thresholds as a caution names it. */
+export const burnSource = 'times after burn-institute figures quoted on the IEEE product safety list';
+
 /** Time in words after which a touch burns; null below every threshold. */
 export function burnTime(
   material: 'metal' | 'glass' | 'plastic',

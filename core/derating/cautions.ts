@@ -1,5 +1,5 @@
 import type { Caution } from '#core/result/result.ts';
-import { burnTime } from './burn-threshold.ts';
+import { burnSource, burnTime } from './burn-threshold.ts';
 import type { FindingContext } from './finding-context.ts';
 import { formatNumber } from '#core/format.ts';
 
@@ -16,37 +16,44 @@ const standing: Caution = {
     'Heat burns skin and can set fire to a board and what lies near it. These figures are calculated: verify them by measurement before people or property depend on them. Local codes and the judgement of a licensed engineer go before this result.',
 };
 
-/** One caution a regulator, for its hottest condition. */
+type Surface = { ref: string; condition: string; metalC: number; caseC: number | null };
+
+/** One caution a part, for its hottest condition. */
 function hotSurfaces({ board, conditions }: FindingContext): Caution[] {
-  return board.regulators.flatMap(({ ref }) => {
-    const seen = conditions.flatMap(({ condition, result }) =>
-      result.regulators
-        .filter((regulator) => regulator.ref === ref && regulator.landC !== null && regulator.caseTopC !== null)
-        .map((regulator) => ({ condition: condition.name, metalC: regulator.landC!, caseC: regulator.caseTopC! })),
-    );
-    const hottest = seen.reduce<(typeof seen)[number] | null>(
-      (most, here) => (!most || here.metalC > most.metalC ? here : most),
-      null,
-    );
-    if (!hottest) return [];
-    const metal = burnTime('metal', hottest.metalC);
-    const plastic = burnTime('plastic', hottest.caseC);
-    if (!metal && !plastic) return [];
-    const parts = [
-      metal &&
-        `bare metal at ${formatNumber(hottest.metalC, 0)} °C burns skin within ${metal.time} (threshold ${metal.thresholdC} °C)`,
-      plastic &&
-        `the case top at ${formatNumber(hottest.caseC, 0)} °C within ${plastic.time} (plastic, ${plastic.thresholdC} °C)`,
-    ].filter(Boolean);
-    return [
-      {
-        kind: 'hot-surface' as const,
-        ref,
-        condition: hottest.condition,
-        message: `Hot surface at ${ref}: ${parts.join('; ')}. Do not touch; guard it and mark it where it can be reached.`,
-      },
-    ];
+  const surfaces = conditions.flatMap(({ condition, result }): Surface[] => [
+    ...result.regulators.flatMap(({ ref, landC, caseTopC }) =>
+      landC === null || caseTopC === null ? [] : [{ ref, condition: condition.name, metalC: landC, caseC: caseTopC }],
+    ),
+    ...result.sources.flatMap(({ ref, maxC }) =>
+      maxC === null ? [] : [{ ref, condition: condition.name, metalC: maxC, caseC: null }],
+    ),
+  ]);
+  return [...board.regulators, ...board.sources].flatMap(({ ref }) => {
+    const hottest = surfaces
+      .filter((surface) => surface.ref === ref)
+      .reduce<Surface | null>((most, here) => (most && most.metalC >= here.metalC ? most : here), null);
+    return hottest ? hotSurface(hottest) : [];
   });
+}
+
+function hotSurface({ ref, condition, metalC, caseC }: Surface): Caution[] {
+  const metal = burnTime('metal', metalC);
+  const plastic = caseC === null ? null : burnTime('plastic', caseC);
+  const parts = [
+    metal &&
+      `bare metal at ${formatNumber(metalC, 0)} °C burns skin within ${metal.time} (from ${metal.thresholdC} °C on)`,
+    plastic &&
+      `the plastic case at ${formatNumber(caseC, 0)} °C within ${plastic.time} (from ${plastic.thresholdC} °C on)`,
+  ].filter(Boolean);
+  if (parts.length === 0) return [];
+  return [
+    {
+      kind: 'hot-surface',
+      ref,
+      condition,
+      message: `Hot surface at ${ref}: ${parts.join('; ')}; ${burnSource}. Do not touch; guard it and mark it where it can be reached.`,
+    },
+  ];
 }
 
 function hotLaminate({ board, conditions }: FindingContext): Caution[] {

@@ -1,6 +1,8 @@
 /** A regulator in one condition, designers' units; null where an input is missing. */
 export type OperatingPoint = {
   ref: string;
+  /** Highest voltage of its feed, before the dropper. */
+  feedV: number | null;
   /** At the pin, after the dropper: the highest input of the condition. */
   inputV: number | null;
   /** The lowest output within the tolerance, or what is left of the input in dropout. */
@@ -12,8 +14,8 @@ export type OperatingPoint = {
   regulating: boolean | null;
   /** Lowest input − droppers − highest output − dropout, V. */
   headroomV: number | null;
-  /** Heat of its dropper, W. */
-  dropperW: number;
+  /** Heat of its dropper, W; null where it has one and cannot be computed. */
+  dropperW: number | null;
   /** What is missing, in words. */
   missing: string[];
 };

@@ -4,7 +4,7 @@ import type { Regulator } from '#core/board/placement.ts';
 import { atCurrent } from './current-table.ts';
 import { orderByFeed } from './feed-order.ts';
 import type { OperatingPoint } from './operating-point.ts';
-import { outputCurrents } from './output-currents.ts';
+import { isShorted, outputCurrents } from './output-currents.ts';
 
 /** Voltages that a regulator offers to those it feeds: at the heat corner and at the headroom corner. */
 type Offer = { heatV: number | null; headroomV: number | null };
@@ -36,22 +36,28 @@ function operate(
 ): { point: OperatingPoint; offer: Offer } {
   const part = board.parts[regulator.part]!;
   const feed = feedVoltages(board, condition, regulator, offers);
-  const isShort = condition.fault?.kind === 'output-short' && condition.fault.ref === regulator.ref;
-  const missing = missingInputs(regulator, condition, currents, feed, isShort);
+  const isShort = isShorted(condition, regulator);
+  const needed = regulator.powerW === null || regulator.dropper !== null || isShort;
   const blank: OperatingPoint = {
     ref: regulator.ref,
+    feedV: feed.heatV,
     inputV: null,
     outputV: null,
     outputA: currents?.outputA ?? null,
     groundA: currents?.groundA ?? null,
-    dissipationW: regulator.powerW,
+    dissipationW: isShort ? null : regulator.powerW,
     regulating: null,
     headroomV: null,
-    dropperW: 0,
-    missing: regulator.powerW === null || isShort ? missing : [],
+    dropperW: regulator.dropper ? null : 0,
+    missing: needed ? missingInputs(regulator, condition, currents, feed, isShort) : [],
   };
-  if (!currents || feed.heatV === null) return { point: blank, offer: { heatV: null, headroomV: null } };
-
+  const lowestV = part.outputV * (1 - part.outputTolerancePct / 100);
+  const highestV = part.outputV * (1 + part.outputTolerancePct / 100);
+  if (!currents || feed.heatV === null) {
+    // A part of known heat with nothing said of its input is taken to regulate, so that what it feeds can be computed.
+    const isKnown = regulator.powerW !== null && !regulator.feed && !isShort;
+    return { point: blank, offer: { heatV: isKnown ? highestV : null, headroomV: isKnown ? lowestV : null } };
+  }
   const resistance = regulator.dropper?.resistanceOhm ?? 0;
   const drop = regulator.dropper?.dropV ?? 0;
   const wanted = currents.outputA + currents.groundA;
@@ -64,8 +70,6 @@ function operate(
   const groundA = inputA - outputA;
   const inputV = Math.max(0, feedV - drop - resistance * inputA);
   const dropoutV = atCurrent(part.dropoutV, outputA);
-  const lowestV = part.outputV * (1 - part.outputTolerancePct / 100);
-  const highestV = part.outputV * (1 + part.outputTolerancePct / 100);
   const held = !isShort && inputV - dropoutV >= lowestV;
   const outputV = isShort ? 0 : held ? lowestV : Math.max(0, inputV - dropoutV);
   const computed = (inputV - outputV) * outputA + inputV * groundA;
@@ -99,7 +103,8 @@ function feedVoltages(
   if ('regulator' in feed) return offers.get(feed.regulator) ?? { heatV: null, headroomV: null };
   const supply = board.supplies.find((candidate) => candidate.name === feed.supply);
   if (!supply) return { heatV: null, headroomV: null };
-  return { heatV: condition.supplies[supply.name] ?? supply.maxV, headroomV: supply.minV };
+  const stated = condition.supplies[supply.name];
+  return { heatV: stated ?? supply.maxV, headroomV: Math.min(supply.minV, stated ?? supply.minV) };
 }
 
 function missingInputs(

@@ -4,6 +4,11 @@ import type { Regulator } from '#core/board/placement.ts';
 import { atCurrent } from './current-table.ts';
 import { orderByFeed } from './feed-order.ts';
 
+/** Whether the condition's fault is a short circuit at this regulator's output. */
+export function isShorted(condition: Condition, { ref }: Pick<Regulator, 'ref'>): boolean {
+  return condition.fault?.kind === 'output-short' && condition.fault.ref === ref;
+}
+
 /** Current that flows into a regulator's short circuit: its limit, or what it folds back to; null when not stated. */
 export function shortCurrent(board: Board, regulator: Regulator): number | null {
   const limit = board.parts[regulator.part]?.currentLimit;
@@ -23,7 +28,7 @@ export function outputCurrents(
   for (const regulator of orderByFeed(board.regulators).reverse()) {
     const fed = board.regulators.filter(({ feed }) => feed && 'regulator' in feed && feed.regulator === regulator.ref);
     const own = condition.loadsA[regulator.ref] ?? (fed.length > 0 ? 0 : null);
-    const isShort = condition.fault?.kind === 'output-short' && condition.fault.ref === regulator.ref;
+    const isShort = isShorted(condition, regulator);
     const below = fed.map(({ ref }) => currents.get(ref) ?? null);
     const part = board.parts[regulator.part];
     const outputA = isShort

@@ -54,7 +54,8 @@ export const regulatorResult = z.strictObject({
 
 export const sourceResult = z.strictObject({
   ref: z.string(),
-  powerW: z.number(),
+  /** With the heat of the droppers that name it; null where nothing says how much. */
+  powerW: optionalNumber,
   /** Mean of the rectangle. */
   temperatureC: optionalNumber,
   maxC: optionalNumber,

@@ -12,6 +12,9 @@ export function netOfLand(board: Board, regulator: Regulator, landName: string):
   return role === 'none' ? `\u0000${regulator.ref} ${landName}` : regulator.nets[role];
 }
 
+/** Whether a net name stands for copper on no net. */
+export const isOwnCopper = (net: string) => net.startsWith('\u0000');
+
 export function placedLands(board: Board, regulator: Regulator): PlacedLand[] {
   const part = board.parts[regulator.part];
   const model = part && board.packages[part.package];

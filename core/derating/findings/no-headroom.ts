@@ -1,4 +1,5 @@
 import type { FindingRule } from '../finding-context.ts';
+import { isShorted } from '#core/electrical/output-currents.ts';
 import { formatNumber } from '#core/format.ts';
 
 /** The lowest input does not carry the highest output at this load: the part starves before it overheats. */
@@ -6,7 +7,7 @@ export const noHeadroom: FindingRule = ({ board, conditions }) =>
   conditions.flatMap(({ condition, points }) =>
     [...points.values()].flatMap((point) => {
       const short = point.headroomV !== null && point.headroomV < 0;
-      const droops = point.regulating === false && !isShorted(condition, point.ref) && (point.inputV ?? 0) > 0;
+      const droops = point.regulating === false && !isShorted(condition, point) && (point.inputV ?? 0) > 0;
       if (!short && !droops) return [];
       const dropper = board.regulators.find((regulator) => regulator.ref === point.ref)?.dropper;
       return [
@@ -25,6 +26,3 @@ export const noHeadroom: FindingRule = ({ board, conditions }) =>
       ];
     }),
   );
-
-const isShorted = (condition: { fault: { kind: string; ref?: string } | null }, ref: string) =>
-  condition.fault?.kind === 'output-short' && condition.fault.ref === ref;

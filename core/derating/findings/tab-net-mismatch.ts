@@ -1,6 +1,6 @@
 import { polygonContains } from '#core/geometry/polygon.ts';
 import { polygonsOverlap } from '#core/geometry/ring-checks.ts';
-import { placedLands } from '#core/thermal/land-placement.ts';
+import { isOwnCopper, placedLands } from '#core/thermal/land-placement.ts';
 import { viaCentres } from '#core/thermal/via-conductance.ts';
 import type { Finding } from '#core/result/result.ts';
 import type { FindingRule } from '../finding-context.ts';
@@ -10,8 +10,10 @@ export const tabNetMismatch: FindingRule = ({ board }) => {
   const found: Finding[] = [];
   for (const regulator of board.regulators) {
     for (const { land, net, layer, pads } of placedLands(board, regulator)) {
+      // Leads that share a land may lie on several nets; "none" says nothing about them.
+      if (land.kind === 'lead' && isOwnCopper(net)) continue;
       const layerName = board.stackup.copper[layer]!.name;
-      const shownNet = net.startsWith('\u0000') ? 'no net' : net;
+      const shownNet = isOwnCopper(net) ? 'no net' : net;
       const what = land.kind === 'tab' ? 'tab' : 'land';
       const report = (object: string, otherNet: string) =>
         found.push({
