@@ -9,5 +9,6 @@ import type { Board } from './document.ts';
  * counts as content, as a result lists it.
  */
 export function hashBoard(board: Board, assumptions: readonly Assumption[]): string {
-  return `sha256:${bytesToHex(sha256(utf8ToBytes(canonicalJson({ assumptions, board }))))}`;
+  const listed = [...assumptions].sort((a, b) => (a.path < b.path ? -1 : 1));
+  return `sha256:${bytesToHex(sha256(utf8ToBytes(canonicalJson({ assumptions: listed, board }))))}`;
 }

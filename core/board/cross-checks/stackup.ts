@@ -8,7 +8,7 @@ export function checkStackup(board: Board, report: Report) {
   if (dielectric.length !== copper.length - 1) {
     report(
       ['stackup', 'dielectric'],
-      `must have ${copper.length - 1} entries, one between every two of the ${copper.length} copper layers, found ${dielectric.length}`,
+      `must have ${copper.length - 1} in its list, one between every two of the ${copper.length} copper layers, found ${dielectric.length}`,
     );
   }
   const order = copper.map((layer) => layer.name);
@@ -22,7 +22,7 @@ export function checkStackup(board: Board, report: Report) {
     known(['viaFields', i, 'to'], via.to);
     const [from, to] = [order.indexOf(via.from), order.indexOf(via.to)];
     if (from >= 0 && to >= 0 && from >= to) {
-      report(['viaFields', i, 'to'], `must lie below ${via.from} in the stack-up, found ${via.to}`);
+      report(['viaFields', i, 'to'], `must lie below ${via.from} in the stack-up, found ${shown(via.to)}`);
     }
   });
 }
