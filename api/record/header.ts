@@ -1,98 +1,33 @@
-import { formatTime } from '#core/record/format-time.ts';
 import type { RecordHeader } from '#core/record/record-document.ts';
-import { copper, heightOf, inkSoft, write, type Sheet } from './sheet.ts';
-import { drawPairs } from './blocks/text.ts';
+import { stateWords } from '#core/record/state-words.ts';
+import { pairsSetter } from './blocks/pairs.ts';
+import { copper, type Sheet } from './sheet.ts';
+import { rule, tagged } from './structure.ts';
+import { lineHeight, linesOf, writeLines } from './typeset.ts';
 import { drawVerdict } from './verdict-mark.ts';
 
-export const stateWords: Record<RecordHeader['state'], string> = {
-  sketch: 'Sketch – not issued',
-  'in review': 'In review – not issued',
-  'sent back': 'Sent back – not issued',
-  cleared: 'Cleared – not issued',
-  issued: 'Issued',
-  superseded: 'Superseded by a later revision',
-  withdrawn: 'Withdrawn',
-  document: 'Board document – not issued',
-};
+/** Assembly and revision as they stand at the head and at the foot: "PCA-0617 Main board, revision B". */
+export function subjectOf({ assembly, letter }: RecordHeader): string {
+  return letter ? `${assembly}, revision ${letter}` : assembly;
+}
 
 /** Title block of the first page. */
 export function drawHeader(sheet: Sheet, header: RecordHeader) {
-  write(sheet, 'Derating record', sheet.left, sheet.y, { width: sheet.width, font: 'semibold', size: 20 });
-  sheet.y += 27;
-  sheet.pdf.rect(sheet.left, sheet.y, sheet.width, 2).fill(copper);
-  sheet.y += 8;
-  const name = header.letter ? `${header.assembly}, revision ${header.letter}` : header.assembly;
-  const height = heightOf(sheet, name, sheet.width, 'semibold', 13);
-  write(sheet, name, sheet.left, sheet.y, { width: sheet.width, font: 'semibold', size: 13 });
-  sheet.y += height + 4;
-  drawVerdict(sheet, header.verdict, sheet.left, sheet.y + 2, 9);
-  write(sheet, `${header.verdict}  ·  ${stateWords[header.state]}`, sheet.left + 15, sheet.y, {
-    width: sheet.width - 15,
-    font: 'semibold',
-    size: 11,
+  const title = { face: 'semibold', size: 20 } as const;
+  tagged(sheet, 'H1', () => writeLines(sheet, ['Derating record'], sheet.left, sheet.y, sheet.width, title));
+  sheet.y += lineHeight(title.size) + 2;
+  rule(sheet, 1.6, copper);
+  sheet.y += 7;
+  const name = { face: 'semibold', size: 13 } as const;
+  const lines = linesOf(sheet, subjectOf(header), sheet.width, name);
+  tagged(sheet, 'P', () => writeLines(sheet, lines, sheet.left, sheet.y, sheet.width, name));
+  sheet.y += lines.length * lineHeight(name.size) + 4;
+  const words = { face: 'semibold', size: 11 } as const;
+  tagged(sheet, 'P', () => {
+    drawVerdict(sheet, header.verdict, sheet.left, sheet.y + 3, 9);
+    const text = `Verdict: ${header.verdict}  ·  ${stateWords[header.state]}`;
+    writeLines(sheet, [text], sheet.left + 15, sheet.y, sheet.width - 15, words);
   });
-  sheet.y += 20;
-  drawPairs(sheet, {
-    kind: 'pairs',
-    rows: [
-      ['Sketch', header.title],
-      ['Content hash', header.inputHash],
-      ['Method version', header.method],
-      ['Date of the revision (UTC)', header.changedAt ? formatTime(header.changedAt) : 'none: printed from a document'],
-      ['Authors', header.authors.join(', ') || 'none stated'],
-    ],
-  });
-}
-
-/** Foot of every page, written when the number of pages is known; a state other than issued stands across the head. */
-export function drawFeet(sheet: Sheet, header: RecordHeader) {
-  const { pdf } = sheet;
-  const { count } = pdf.bufferedPageRange();
-  const name = header.letter ? `${header.assembly}, revision ${header.letter}` : header.assembly;
-  const isFinal = header.state === 'issued';
-  for (let page = 0; page < count; page++) {
-    pdf.switchToPage(page);
-    const y = sheet.pageHeight - 40;
-    pdf
-      .lineWidth(0.5)
-      .strokeColor(inkSoft)
-      .moveTo(sheet.left, y - 5)
-      .lineTo(sheet.left + sheet.width, y - 5)
-      .stroke();
-    const room = sheet.width - 90;
-    write(sheet, clipped(sheet, `${name}  ·  ${stateWords[header.state]}`, room), sheet.left, y, {
-      width: room,
-      size: 7.6,
-      colour: inkSoft,
-      single: true,
-    });
-    write(sheet, `${header.inputHash.slice(0, 23)}…  ·  method ${header.method}`, sheet.left, y + 10, {
-      width: room,
-      size: 7.6,
-      colour: inkSoft,
-      single: true,
-    });
-    write(sheet, `page ${page + 1} of ${count}`, sheet.left + sheet.width - 90, y, {
-      width: 90,
-      size: 8,
-      align: 'right',
-    });
-    if (!isFinal) {
-      write(sheet, stateWords[header.state].toUpperCase(), sheet.left, 24, {
-        width: sheet.width,
-        font: 'semibold',
-        size: 9,
-        align: 'center',
-        colour: inkSoft,
-      });
-    }
-  }
-}
-
-function clipped(sheet: Sheet, text: string, width: number): string {
-  sheet.pdf.font('regular').fontSize(7.6);
-  if (sheet.pdf.widthOfString(text) <= width) return text;
-  let end = text.length;
-  while (end > 0 && sheet.pdf.widthOfString(`${text.slice(0, end)}…`) > width) end--;
-  return `${text.slice(0, end)}…`;
+  sheet.y += lineHeight(words.size) + 7;
+  pairsSetter.draw(sheet, { kind: 'pairs', rows: header.facts });
 }

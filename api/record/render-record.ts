@@ -1,65 +1,101 @@
-import type { RecordBlock, RecordDocument } from '#core/record/record-document.ts';
-import { drawBoard } from './blocks/drawing.ts';
-import { drawLadders } from './blocks/ladders.ts';
-import { drawTable } from './blocks/table.ts';
-import { drawCaution, drawHeading, drawNotice, drawPairs, drawText } from './blocks/text.ts';
-import { drawFeet, drawHeader } from './header.ts';
-import { ensure, openSheet, write, type Paper, type Sheet } from './sheet.ts';
-
-/** Date of a document that belongs to no revision: fixed, as the record must not depend on when it is printed. */
-const undated = new Date('2000-01-01T00:00:00Z');
-/** Height that a drawing with its legend may take, points. */
-const roomForDrawing = 350;
+import type { RecordBlock, RecordDocument, RecordSection } from '#core/record/record-document.ts';
+import type { BlockSetter } from './block.ts';
+import { copperSetter } from './blocks/copper.ts';
+import { heatSetter } from './blocks/heat.ts';
+import { laddersSetter } from './blocks/ladders.ts';
+import { cautionSetter, noticeSetter } from './blocks/framed.ts';
+import { pairsSetter } from './blocks/pairs.ts';
+import { tableSetter } from './blocks/table.ts';
+import { headingSetter, listSetter, textSetter } from './blocks/text.ts';
+import { drawFeet } from './feet.ts';
+import { drawHeader, subjectOf } from './header.ts';
+import { ensure, openSheet, type Paper, type Sheet } from './sheet.ts';
+import { group, tagged } from './structure.ts';
+import { lineHeight, writeLines } from './typeset.ts';
 
 /**
- * The record as a PDF: light, readable in grey, fonts embedded, text selectable, sections as bookmarks.
+ * The record as a PDF: light, readable in grey, fonts embedded, tagged, sections as bookmarks.
  * The bytes depend on the record and the paper alone.
  */
 export async function renderRecord(record: RecordDocument, paper: Paper): Promise<Buffer> {
   const { header } = record;
   const sheet = openSheet(paper, {
-    title: `Derating record ${header.assembly}${header.letter ? ` revision ${header.letter}` : ''}`,
-    date: header.changedAt ? new Date(header.changedAt) : undated,
+    title: `Derating record ${subjectOf(header)}`,
+    subject: header.title,
+    date: header.changedAt ? new Date(header.changedAt) : null,
   });
   const finished = collect(sheet.pdf);
   drawHeader(sheet, header);
-  record.sections.forEach((section, index) => {
-    // A section's title stays with what follows it.
-    ensure(sheet, section.blocks[0]?.kind === 'drawing' ? roomForDrawing : 90);
-    sheet.y += 6;
-    sheet.pdf.outline.addItem(section.title);
-    write(sheet, `${index + 1}  ${section.title}`, sheet.left, sheet.y, {
-      width: sheet.width,
-      font: 'semibold',
-      size: 13,
-    });
-    sheet.y += 19;
-    for (const block of section.blocks) drawBlock(sheet, block);
-  });
+  record.sections.forEach((section, index) => drawSection(sheet, section, index + 1));
   drawFeet(sheet, header);
+  sheet.parent.end();
   sheet.pdf.end();
   return await finished;
 }
 
+const title = { face: 'semibold', size: 13 } as const;
+const titleHeight = lineHeight(title.size) + 4;
+
+function drawSection(sheet: Sheet, { title: words, blocks }: RecordSection, number: number) {
+  ensure(sheet, 8 + titleHeight + leadOf(sheet, blocks, 0));
+  if (sheet.y > sheet.top) sheet.y += 8;
+  const bookmark = sheet.pdf.outline.addItem(`${number}  ${words}`);
+  group(sheet, 'Sect', () => {
+    tagged(sheet, 'H2', () => writeLines(sheet, [`${number}  ${words}`], sheet.left, sheet.y, sheet.width, title));
+    sheet.y += titleHeight;
+    blocks.forEach((block, index) => {
+      if (block.kind === 'heading') {
+        ensure(sheet, leadOf(sheet, blocks, index));
+        bookmark.addItem(block.text);
+      }
+      drawBlock(sheet, block);
+    });
+  });
+}
+
+/**
+ * Height that the block needs to begin on a page. A heading needs what follows it as well, and so does the text that
+ * introduces a table or a drawing.
+ */
+function leadOf(sheet: Sheet, blocks: readonly RecordBlock[], index: number): number {
+  const block = blocks[index];
+  if (!block) return 0;
+  const next = blocks[index + 1]?.kind;
+  const leadsIn = block.kind === 'heading' || (block.kind === 'text' && next !== 'text' && next !== 'heading');
+  return setterOf(block).lead(sheet) + (leadsIn ? leadOf(sheet, blocks, index + 1) : 0);
+}
+
 function drawBlock(sheet: Sheet, block: RecordBlock) {
+  setterOf(block).draw(sheet);
+}
+
+function setterOf(block: RecordBlock): { lead(sheet: Sheet): number; draw(sheet: Sheet): void } {
   switch (block.kind) {
     case 'heading':
-      return drawHeading(sheet, block);
+      return bound(headingSetter, block);
     case 'text':
-      return drawText(sheet, block);
+      return bound(textSetter, block);
+    case 'list':
+      return bound(listSetter, block);
     case 'notice':
-      return drawNotice(sheet, block);
+      return bound(noticeSetter, block);
     case 'caution':
-      return drawCaution(sheet, block);
+      return bound(cautionSetter, block);
     case 'pairs':
-      return drawPairs(sheet, block);
+      return bound(pairsSetter, block);
     case 'table':
-      return drawTable(sheet, block);
+      return bound(tableSetter, block);
     case 'ladders':
-      return drawLadders(sheet, block.ladders);
-    case 'drawing':
-      return drawBoard(sheet, block.drawing);
+      return bound(laddersSetter, block);
+    case 'copper':
+      return bound(copperSetter, block);
+    case 'heat':
+      return bound(heatSetter, block);
   }
+}
+
+function bound<B>(setter: BlockSetter<B>, block: B) {
+  return { lead: (sheet: Sheet) => setter.lead(sheet, block), draw: (sheet: Sheet) => setter.draw(sheet, block) };
 }
 
 function collect(pdf: PDFKit.PDFDocument): Promise<Buffer> {

@@ -12,9 +12,11 @@ export const inkSoft = '#55504a';
 export const line = '#b9b2a6';
 export const copper = '#a94f28';
 
+export type Face = keyof typeof fonts;
 export type Paper = 'a4' | 'letter';
-const sizes: Record<Paper, [number, number]> = { a4: [595.28, 841.89], letter: [612, 792] };
-const margin = { left: 46, right: 46, top: 50, bottom: 62 };
+/** Points: 210 × 297 mm and 8.5 × 11 in. */
+export const paperSizes: Record<Paper, [number, number]> = { a4: [595.28, 841.89], letter: [612, 792] };
+const margin = { left: 48, right: 44, top: 56, bottom: 60 };
 
 /** A PDF with a cursor that runs down the page; points, origin at the top left. */
 export type Sheet = {
@@ -25,29 +27,44 @@ export type Sheet = {
   bottom: number;
   pageHeight: number;
   y: number;
+  /** Structure element that what is drawn next belongs to. */
+  parent: PDFKit.PDFStructureElement;
 };
 
-/** @param date stands in every date field, so that the same record gives the same bytes */
-export function openSheet(paper: Paper, about: { title: string; date: Date }): Sheet {
-  const [pageWidth, pageHeight] = sizes[paper];
+/** Stands in the file's identifier of a record without a date; it is in no field that a reader sees. */
+const undated = new Date('2000-01-01T00:00:00Z');
+
+/** @param about.date stands in every date field, so that the same record gives the same bytes; null: no date is stated */
+export function openSheet(paper: Paper, about: { title: string; subject: string; date: Date | null }): Sheet {
+  const [pageWidth, pageHeight] = paperSizes[paper];
+  const date = about.date ?? undated;
   const pdf = new PDFDocument({
-    size: sizes[paper],
+    size: paperSizes[paper],
     margins: { left: 0, right: 0, top: 0, bottom: 0 },
     bufferPages: true,
     autoFirstPage: true,
+    pdfVersion: '1.7',
+    tagged: true,
     lang: 'en',
     displayTitle: true,
     info: {
       Title: about.title,
+      Subject: about.subject,
       Producer: 'Dropwatt',
       Creator: 'Dropwatt',
-      CreationDate: about.date,
-      ModDate: about.date,
+      CreationDate: date,
+      ModDate: date,
     },
   });
+  if (!about.date) {
+    delete pdf.info.CreationDate;
+    delete pdf.info.ModDate;
+  }
   pdf.registerFont('regular', fonts.regular);
   pdf.registerFont('semibold', fonts.semibold);
   pdf.font('regular').fontSize(9).fillColor(ink);
+  const parent = pdf.struct('Document');
+  pdf.addStructure(parent);
   return {
     pdf,
     left: margin.left,
@@ -56,6 +73,7 @@ export function openSheet(paper: Paper, about: { title: string; date: Date }): S
     bottom: pageHeight - margin.bottom,
     pageHeight,
     y: margin.top,
+    parent,
   };
 }
 
@@ -65,46 +83,4 @@ export function ensure(sheet: Sheet, height: number): boolean {
   sheet.pdf.addPage();
   sheet.y = sheet.top;
   return true;
-}
-
-/** Text that pdfkit may wrap in a column, and nothing else: no page of its own making. */
-export function heightOf(
-  sheet: Sheet,
-  text: string,
-  width: number,
-  font: 'regular' | 'semibold',
-  size: number,
-): number {
-  return sheet.pdf.font(font).fontSize(size).heightOfString(breakable(text), { width, lineGap: 1 });
-}
-
-export function write(
-  sheet: Sheet,
-  text: string,
-  x: number,
-  y: number,
-  options: {
-    width: number;
-    font?: 'regular' | 'semibold';
-    size?: number;
-    colour?: string;
-    align?: 'left' | 'right' | 'center';
-    single?: boolean;
-  },
-) {
-  sheet.pdf
-    .font(options.font ?? 'regular')
-    .fontSize(options.size ?? 9)
-    .fillColor(options.colour ?? ink)
-    .text(options.single ? text : breakable(text), x, y, {
-      width: options.width,
-      align: options.align ?? 'left',
-      lineGap: 1,
-      ...(options.single ? { lineBreak: false } : {}),
-    });
-}
-
-/** Lets a word that is longer than a column be broken: pdfkit would let it run out of the table. */
-function breakable(text: string): string {
-  return text.replace(/[^\s\u200b]{28}(?=[^\s\u200b])/g, '$&\u200b');
 }

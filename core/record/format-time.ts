@@ -1,4 +1,8 @@
-/** ISO time as "2026-12-01 14:05 +00:00": date, time and offset, whatever the reader's machine is set to. */
+/**
+ * A time as "2026-12-01 14:05:33 +00:00": date, time and UTC offset, whatever the reader's machine is set to.
+ * @param iso any ISO 8601 time with its offset
+ */
 export function formatTime(iso: string): string {
-  return `${iso.slice(0, 10)} ${iso.slice(11, 16)} +00:00`;
+  const utc = new Date(iso).toISOString();
+  return `${utc.slice(0, 10)} ${utc.slice(11, 19)} +00:00`;
 }

@@ -1,7 +1,7 @@
 import type { Board } from '#core/board/document.ts';
+import type { CheckResult } from '#core/result/result.ts';
 import type { FindingReason } from '#core/review/guards.ts';
 import type { RevisionState } from '#core/review/revision-state.ts';
-import type { CheckResult } from '#core/result/result.ts';
 import type { HeatField } from '#core/thermal/heat-field.ts';
 
 /** All that a record is made from; `revision` null for a document checked on the command line. */
@@ -13,6 +13,7 @@ export type RecordInput = {
   revision: RecordedRevision | null;
 };
 
+/** Facts of a revision as they stand in the database; times in ISO 8601. */
 export type RecordedRevision = {
   assemblyNumber: string;
   assemblyTitle: string;

@@ -1,82 +1,41 @@
-import type { RecordBlock, RecordCell } from '#core/record/record-document.ts';
-import { ensure, heightOf, inkSoft, line, write, type Sheet } from '../sheet.ts';
-import { drawVerdict } from '../verdict-mark.ts';
+import type { RecordBlock } from '#core/record/record-document.ts';
+import type { BlockSetter } from '../block.ts';
+import { inkSoft, line, type Sheet } from '../sheet.ts';
+import { lineHeight } from '../typeset.ts';
+import { drawRows, leadOfRows, type RowLayout } from './rows.ts';
+import { textSetter } from './text.ts';
 
 type Table = Extract<RecordBlock, { kind: 'table' }>;
 
-const size = 8;
-const padX = 4;
-const padY = 2.4;
-const markWidth = 10;
+/** A table whose head is repeated on every page. */
+export const tableSetter: BlockSetter<Table> = {
+  lead(sheet, table) {
+    if (table.rows.length === 0) return table.empty ? lineHeight(9) : 0;
+    return leadOfRows(sheet, layoutOf(sheet, table), headOf(table), table.rows.slice(0, 2));
+  },
+  draw(sheet, table) {
+    if (table.rows.length === 0) {
+      if (table.empty) textSetter.draw(sheet, { kind: 'text', text: table.empty });
+      return;
+    }
+    drawRows(sheet, layoutOf(sheet, table), headOf(table), table.rows);
+    sheet.y += 9;
+  },
+};
 
-/** A table whose head is repeated on every page and whose rows are never cut. */
-export function drawTable(sheet: Sheet, table: Table) {
-  if (table.rows.length === 0) {
-    if (!table.empty) return;
-    ensure(sheet, 16);
-    write(sheet, table.empty, sheet.left, sheet.y, { width: sheet.width, colour: inkSoft });
-    sheet.y += 18;
-    return;
-  }
-  const total = table.columns.reduce((sum, column) => sum + column.weight, 0);
-  const widths = table.columns.map((column) => (column.weight / total) * sheet.width);
-  const starts = widths.map((_, k) => sheet.left + widths.slice(0, k).reduce((sum, width) => sum + width, 0));
-  const headHeight =
-    Math.max(
-      ...table.columns.map((column, k) => heightOf(sheet, column.title, widths[k]! - 2 * padX, 'semibold', size)),
-    ) +
-    2 * padY;
-  const heights = table.rows.map(
-    (row) => Math.max(...row.map((cell, k) => cellHeight(sheet, cell, widths[k]!))) + 2 * padY,
-  );
+const headOf = ({ columns }: Table) => columns.map(({ title }) => title);
 
-  const head = () => {
-    table.columns.forEach((column, k) => {
-      write(sheet, column.title, starts[k]! + padX, sheet.y + padY, {
-        width: widths[k]! - 2 * padX,
-        font: 'semibold',
-        size,
-        align: column.align ?? 'left',
-      });
-    });
-    sheet.y += headHeight;
-    rule(sheet, 0.9, '#1d1b19');
+function layoutOf(sheet: Sheet, { columns }: Table): RowLayout {
+  const total = columns.reduce((sum, { weight }) => sum + weight, 0);
+  let x = sheet.left;
+  return {
+    columns: columns.map(({ weight, align = 'left' }) => {
+      const column = { x, width: (weight / total) * sheet.width, align };
+      x += column.width;
+      return column;
+    }),
+    size: 8,
+    ruleColour: line,
+    headColour: inkSoft,
   };
-  ensure(sheet, headHeight + heights[0]!);
-  head();
-  table.rows.forEach((row, index) => {
-    if (ensure(sheet, heights[index]!)) head();
-    row.forEach((cell, k) => drawCell(sheet, cell, starts[k]!, widths[k]!, table.columns[k]!.align ?? 'left'));
-    sheet.y += heights[index]!;
-    rule(sheet, 0.4, line);
-  });
-  sheet.y += 9;
-}
-
-function cellHeight(sheet: Sheet, cell: RecordCell, width: number): number {
-  const text = typeof cell === 'string' ? cell : cell.verdict;
-  const room = width - 2 * padX - (typeof cell === 'string' ? 0 : markWidth);
-  return heightOf(sheet, text || ' ', room, 'regular', size);
-}
-
-function drawCell(sheet: Sheet, cell: RecordCell, x: number, width: number, align: 'left' | 'right') {
-  if (typeof cell === 'string') {
-    write(sheet, cell, x + padX, sheet.y + padY, { width: width - 2 * padX, size, align });
-    return;
-  }
-  drawVerdict(sheet, cell.verdict, x + padX, sheet.y + padY + 2);
-  write(sheet, cell.verdict, x + padX + markWidth, sheet.y + padY, {
-    width: width - 2 * padX - markWidth,
-    size,
-    font: cell.verdict === 'within' ? 'regular' : 'semibold',
-  });
-}
-
-function rule(sheet: Sheet, width: number, colour: string) {
-  sheet.pdf
-    .lineWidth(width)
-    .strokeColor(colour)
-    .moveTo(sheet.left, sheet.y)
-    .lineTo(sheet.left + sheet.width, sheet.y)
-    .stroke();
 }

@@ -1,4 +1,5 @@
 import { sameFinding } from '#core/review/guards.ts';
+import { formatTime } from '../format-time.ts';
 import type { RecordBlock, RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
@@ -9,31 +10,37 @@ export function findingsSection({ result, revision }: RecordInput): RecordSectio
       kind: 'table',
       columns: [
         { title: 'Severity', weight: 0.9 },
-        { title: 'Place', weight: 1.4 },
+        { title: 'Place', weight: 1.5 },
         { title: 'Finding and remedy', weight: 4.4 },
-        { title: 'Reason given', weight: 2.6 },
+        { title: 'Reason given', weight: 2.4 },
       ],
       rows: result.findings.map((finding) => [
         finding.severity,
-        [finding.ref, finding.condition].filter(Boolean).join(', ') || 'board',
-        `${finding.message} ${finding.remedy}`,
+        [finding.ref, finding.condition].filter(Boolean).join(', ') || 'whole board',
+        `${finding.message} ${finding.remedy}`.trim(),
         revision?.reasons.find((reason) => sameFinding(reason, finding))?.reason ??
-          (finding.severity === 'warn' ? 'none given' : '–'),
+          (finding.severity === 'warn' ? 'none given' : 'none needed'),
       ]),
       empty: 'Nothing was found.',
     },
   ];
   if (revision && revision.comments.length > 0) {
     blocks.push(
-      { kind: 'heading', text: 'Comments' },
+      { kind: 'heading', text: 'Comments of the review' },
       {
         kind: 'table',
         columns: [
-          { title: 'By', weight: 1.2 },
-          { title: 'Comment', weight: 5 },
-          { title: 'Resolved by', weight: 1.2 },
+          { title: 'By', weight: 1.4 },
+          { title: 'At', weight: 1.4 },
+          { title: 'Comment', weight: 4.6 },
+          { title: 'Resolved by', weight: 1.4 },
         ],
-        rows: revision.comments.map((comment) => [comment.author, comment.text, comment.resolvedBy ?? 'open']),
+        rows: revision.comments.map(({ author, createdAt, text, resolvedBy }) => [
+          author,
+          formatTime(createdAt),
+          text,
+          resolvedBy ?? 'open',
+        ]),
         empty: '',
       },
     );

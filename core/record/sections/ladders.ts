@@ -1,13 +1,14 @@
-import { governingOf } from '../governing.ts';
+import { governingByRegulator, junctionLimit } from '../governing.ts';
 import type { RecordLadder, RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
 /** The rise ladder of every regulator in its governing condition. */
 export function laddersSection({ board, result }: RecordInput): RecordSection {
+  const governing = governingByRegulator(result);
   const ladders = board.regulators.flatMap(({ ref }): RecordLadder[] => {
-    const governing = governingOf(result, ref);
-    const settings = board.conditions.find(({ name }) => name === governing?.condition.name);
-    const regulator = governing?.regulator;
+    const found = governing.get(ref);
+    const settings = board.conditions.find(({ name }) => name === found?.condition.name);
+    const regulator = found?.regulator;
     if (!settings || !regulator?.ladderK || regulator.junctionC === null) return [];
     return [
       {
@@ -17,7 +18,7 @@ export function laddersSection({ board, result }: RecordInput): RecordSection {
         steps: regulator.ladderK,
         junctionC: regulator.junctionC,
         uncertaintyK: regulator.uncertaintyK ?? 0,
-        limitC: governing?.limit?.limit ?? null,
+        limitC: junctionLimit(regulator)?.limit ?? null,
         verdict: regulator.verdict,
       },
     ];
@@ -26,6 +27,14 @@ export function laddersSection({ board, result }: RecordInput): RecordSection {
     id: 'ladders',
     title: 'Rise ladders',
     blocks:
-      ladders.length > 0 ? [{ kind: 'ladders', ladders }] : [{ kind: 'text', text: 'No junction was evaluated.' }],
+      ladders.length > 0
+        ? [
+            {
+              kind: 'text',
+              text: 'Each junction in its governing condition: the outside ambient, then the rises of box, preheated air, neighbours, own board and package, up to the junction.',
+            },
+            { kind: 'ladders', ladders },
+          ]
+        : [{ kind: 'text', text: 'No junction was evaluated.' }],
   };
 }

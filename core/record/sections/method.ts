@@ -1,28 +1,38 @@
+import { deference, notCovered } from '../method-limits.ts';
 import type { RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
-/** How the figures were made, where they hold, and what they do not cover. */
+/** How the figures were made, where they hold, what they do not cover and what goes before them. */
 export function methodSection({ result }: RecordInput): RecordSection {
   return {
     id: 'method',
-    title: 'Method and its limits',
+    title: 'Method, validity and limits',
     blocks: [
       {
         kind: 'text',
-        text: `Method version ${result.method}. The board is solved as layers of cells with the copper of every layer by net, laminate, via barrels, lands, and a star of thermal resistances for each package; heat leaves by natural or forced convection and by radiation from both faces and from the case tops. No data-sheet θJA is used. Each solution states its residual, its energy balance and its grid error.`,
+        text: `Method version ${result.method}. The board is solved as layers of cells: the copper of every layer by net, laminate, via barrels and lands, with a star of thermal resistances for each package. Heat leaves by natural or forced convection and by radiation from both faces and from the case tops, with air of the stated temperature and altitude. No data-sheet θJA enters. Every solution states its residual, its heat balance and its grid error; a verdict comes from a converged solution only.`,
       },
       {
         kind: 'text',
-        text: 'The band of a junction combines the grid error with the model error, which is taken from published test boards: one standard deviation of 13 % of the rise in still air and 26 % in moving air. “Close” means inside the limit, but by no more than this band.',
+        text: `The band (±) of a junction combines the grid error with the model error, one standard deviation each. The model error is the share of the rise by which published test boards are missed: ${modelErrors(result)} in the conditions of this record. “Close” means inside the limit, but by no more than this band.`,
       },
-      {
-        kind: 'text',
-        text: 'Not covered: transients and start-up, ageing and dust, solder voids, heat that leaves through cables and connectors, sunlight, potting, and parts that are not drawn. Package values marked as typical are those of the outline, not of the part. Steady state is assumed.',
-      },
-      {
-        kind: 'text',
-        text: 'A calculation is no measurement: verify it on the built board before people or property depend on it. Local codes, product standards and the judgement of a licensed engineer go before this record.',
-      },
+      { kind: 'heading', text: 'What the calculation does not cover' },
+      { kind: 'list', items: notCovered },
+      { kind: 'heading', text: 'What goes before it' },
+      ...deference.map((text) => ({ kind: 'text' as const, text })),
     ],
   };
+}
+
+/** Shares as they were used, read back from the result: later versions of the method may use others. */
+function modelErrors(result: RecordInput['result']): string {
+  const shares = result.conditions.flatMap(({ regulators }) =>
+    regulators.flatMap(({ modelErrorK, ladderK }) => {
+      if (modelErrorK === null || !ladderK) return [];
+      const riseK = ladderK.air + ladderK.neighbours + ladderK.board + ladderK.package;
+      return riseK > 0 ? [Math.round((100 * modelErrorK) / riseK)] : [];
+    }),
+  );
+  const different = [...new Set(shares)].toSorted((a, b) => a - b);
+  return different.length > 0 ? `${different.map((share) => `${share} %`).join(' and ')}` : 'not evaluated';
 }

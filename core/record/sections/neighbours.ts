@@ -1,73 +1,101 @@
 import { formatNumber } from '#core/format.ts';
-import { governingOf } from '../governing.ts';
+import type { SourceResult, Verdict } from '#core/result/result.ts';
 import type { RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
-const shown = 4;
+const severity: readonly Verdict[] = ['within', 'close', 'not evaluated', 'over'];
 
-/** Who heats whom in the governing condition, and the neighbours' own limits. */
+/** Other parts, the laminate and the probes against what they may reach, each in its hottest condition. */
 export function neighboursSection({ board, result }: RecordInput): RecordSection {
   return {
     id: 'neighbours',
-    title: 'Heat ledger and neighbours',
+    title: 'Neighbours and board',
     blocks: [
       {
         kind: 'table',
         columns: [
-          { title: 'Junction', weight: 1 },
-          { title: 'Condition', weight: 2.2 },
-          { title: 'Heated by, K (largest first)', weight: 5 },
-        ],
-        rows: board.regulators.map(({ ref }) => {
-          const condition = governingOf(result, ref)?.condition;
-          const entries = (condition?.ledger ?? [])
-            .filter((entry) => entry.victim === ref)
-            .toSorted((a, b) => b.riseK - a.riseK);
-          const rest = entries.slice(shown).reduce((sum, entry) => sum + entry.riseK, 0);
-          const words = entries
-            .slice(0, shown)
-            .map((entry) => `${entry.source === ref ? 'itself' : entry.source} ${formatNumber(entry.riseK, 1)}`);
-          if (entries.length > shown) words.push(`${entries.length - shown} others ${formatNumber(rest, 1)}`);
-          return [ref, condition?.name ?? 'none', words.join(' · ') || 'not evaluated'];
-        }),
-        empty: 'The board has no regulator.',
-      },
-      {
-        kind: 'table',
-        columns: [
           { title: 'Neighbour', weight: 1.2 },
-          { title: 'Condition', weight: 2.4 },
-          { title: 'Heat W', weight: 1, align: 'right' },
-          { title: 'Mean °C', weight: 1, align: 'right' },
+          { title: 'Condition', weight: 2.2 },
+          { title: 'Heat W', weight: 0.9, align: 'right' },
           { title: 'Hottest °C', weight: 1, align: 'right' },
+          { title: 'Mean °C', weight: 0.9, align: 'right' },
           { title: 'Limit °C', weight: 1, align: 'right' },
-          { title: 'Verdict', weight: 1.6 },
+          { title: 'Margin K', weight: 1, align: 'right' },
+          { title: 'Verdict', weight: 1.7 },
         ],
-        rows: board.sources.flatMap(({ ref }) => {
-          const seen = result.conditions.flatMap((condition) =>
-            condition.sources
-              .filter((source) => source.ref === ref)
-              .map((source) => ({ name: condition.name, source })),
-          );
-          const hottest = seen.toSorted(
-            (a, b) => (b.source.temperatureC ?? -Infinity) - (a.source.temperatureC ?? -Infinity),
-          )[0];
-          if (!hottest) return [];
-          const { source } = hottest;
+        rows: board.sources.map(({ ref, limitC }) => {
+          const found = hottestOf(result, ref);
+          const mean = found?.source.temperatureC ?? null;
           return [
-            [
-              ref,
-              hottest.name,
-              formatNumber(source.powerW, 3),
-              formatNumber(source.temperatureC, 1),
-              formatNumber(source.maxC, 1),
-              formatNumber(source.limitC, 1),
-              source.limitC === null ? 'no limit stated' : { verdict: source.verdict },
-            ],
+            ref,
+            found?.name ?? 'none',
+            formatNumber(found?.source.powerW, 3),
+            formatNumber(found?.source.maxC, 1),
+            formatNumber(mean, 1),
+            limitC === null ? 'not stated' : formatNumber(limitC, 1),
+            formatNumber(mean === null || limitC === null ? null : limitC - mean, 1),
+            limitC === null ? 'not judged' : { verdict: found?.source.verdict ?? ('not evaluated' as const) },
           ];
         }),
         empty: 'No neighbour is on the board.',
       },
+      { kind: 'heading', text: 'Board' },
+      {
+        kind: 'table',
+        columns: [
+          { title: 'Condition', weight: 3 },
+          { title: 'Hottest °C', weight: 1, align: 'right' },
+          { title: 'at mm', weight: 1.2, align: 'right' },
+          { title: 'Mean °C', weight: 1, align: 'right' },
+          { title: 'Laminate limit °C', weight: 1.4, align: 'right' },
+          { title: 'Margin K', weight: 1, align: 'right' },
+        ],
+        rows: result.conditions.map(({ name, board: heat }) => [
+          name,
+          formatNumber(heat?.maxC, 1),
+          heat ? heat.maxAt.map((value) => formatNumber(value, 1)).join(', ') : '–',
+          formatNumber(heat?.meanC, 1),
+          formatNumber(board.stackup.maxOperatingC, 1),
+          formatNumber(heat ? board.stackup.maxOperatingC - heat.maxC : null, 1),
+        ]),
+        empty: 'There is no operating condition.',
+      },
+      { kind: 'heading', text: 'Probes' },
+      {
+        kind: 'table',
+        columns: [
+          { title: 'Probe', weight: 1.4 },
+          { title: 'At mm', weight: 1.2, align: 'right' },
+          { title: 'Side', weight: 0.8 },
+          { title: 'Temperature °C by condition', weight: 5 },
+        ],
+        rows: board.probes.map(({ id, at, side }) => [
+          id,
+          at.map((value) => formatNumber(value, 1)).join(', '),
+          side,
+          result.conditions
+            .map(
+              ({ name, probes }) =>
+                `${name}: ${formatNumber(probes.find((probe) => probe.id === id)?.temperatureC, 1)}`,
+            )
+            .join('; ') || 'none',
+        ]),
+        empty: 'There is no probe.',
+      },
     ],
   };
+}
+
+/** The condition in which a neighbour is worst off: by verdict, then by temperature. */
+function hottestOf(result: RecordInput['result'], ref: string): { name: string; source: SourceResult } | null {
+  const seen = result.conditions.flatMap(({ name, sources }) =>
+    sources.filter((source) => source.ref === ref).map((source) => ({ name, source })),
+  );
+  return (
+    seen.toSorted(
+      (a, b) =>
+        severity.indexOf(b.source.verdict) - severity.indexOf(a.source.verdict) ||
+        (b.source.temperatureC ?? -Infinity) - (a.source.temperatureC ?? -Infinity),
+    )[0] ?? null
+  );
 }

@@ -3,18 +3,22 @@ import type { RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
 const meanings = {
-  authored: 'Authored and submitted',
-  reviewed: 'Reviewed and cleared',
-  released: 'Released',
+  authored: 'Authorship: authored and submitted for review',
+  reviewed: 'Review: reviewed and cleared',
+  released: 'Approval: released',
 } as const;
 
+/** Who signed, when, and what the signature means (the three things 21 CFR 11.50 asks a signature to show). */
 export function signaturesSection({ revision, result }: RecordInput): RecordSection {
   if (!revision) {
     return {
       id: 'signatures',
       title: 'Signatures',
       blocks: [
-        { kind: 'notice', text: 'Printed from a board document: it belongs to no revision and nobody has signed it.' },
+        {
+          kind: 'notice',
+          text: 'Not issued: printed from a board document. It belongs to no revision and nobody has signed it.',
+        },
       ],
     };
   }
@@ -25,16 +29,16 @@ export function signaturesSection({ revision, result }: RecordInput): RecordSect
       {
         kind: 'table',
         columns: [
-          { title: 'Meaning', weight: 2 },
           { title: 'Name', weight: 2 },
-          { title: 'Signed at (UTC)', weight: 2 },
+          { title: 'Meaning', weight: 2.4 },
+          { title: 'Signed at (date, time, UTC offset)', weight: 2 },
         ],
-        rows: revision.signatures.map(({ meaning, name, signedAt }) => [meanings[meaning], name, formatTime(signedAt)]),
+        rows: revision.signatures.map(({ meaning, name, signedAt }) => [name, meanings[meaning], formatTime(signedAt)]),
         empty: 'Nobody has signed yet.',
       },
       {
         kind: 'text',
-        text: `The signatures belong to revision ${revision.letter} with the content ${result.inputHash}. Any change of the content opens the next revision.`,
+        text: `Each signature was given with the signer’s password and belongs to revision ${revision.letter} with the board content ${result.inputHash}. Any change of the content opens the next revision.`,
       },
     ],
   };
