@@ -31,14 +31,19 @@ export type Sheet = {
   parent: PDFKit.PDFStructureElement;
 };
 
-/** Stands in the file's identifier of a record without a date; it is in no field that a reader sees. */
+/** Goes into the file's identifier of a record without a date, and into no field that a reader sees. */
 const undated = new Date('2000-01-01T00:00:00Z');
+
+/** Without the XMP stream: pdfkit writes names into it without escaping, and cannot leave out its date. */
+class RecordPdf extends PDFDocument {
+  override endMetadata(): void {}
+}
 
 /** @param about.date stands in every date field, so that the same record gives the same bytes; null: no date is stated */
 export function openSheet(paper: Paper, about: { title: string; subject: string; date: Date | null }): Sheet {
   const [pageWidth, pageHeight] = paperSizes[paper];
   const date = about.date ?? undated;
-  const pdf = new PDFDocument({
+  const pdf = new RecordPdf({
     size: paperSizes[paper],
     margins: { left: 0, right: 0, top: 0, bottom: 0 },
     bufferPages: true,

@@ -23,7 +23,7 @@ import {
 import { drawParts, drawVias } from './parts.ts';
 
 const gap = 16;
-const tallest = 190;
+const tallest = 160;
 const titleHeight = lineHeight(8.4) + 3;
 const labelSize = 6.6;
 
@@ -67,9 +67,9 @@ function drawingsOf(board: Board): Drawing[] {
       },
     },
     ...board.stackup.copper.map((layer, index): Drawing => {
-      const place = index === 0 ? ', top' : index === board.stackup.copper.length - 1 ? ', bottom' : '';
+      const place = index === 0 ? ' (top)' : index === board.stackup.copper.length - 1 ? ' (bottom)' : '';
       return {
-        title: `${layer.name}${place}, ${formatGiven(layer.thicknessUm, 'µm')}`,
+        title: `Layer ${layer.name}${place}, ${formatGiven(layer.thicknessUm, 'µm')}`,
         draw: (sheet, view) => drawLayer(sheet, view, board, index),
       };
     }),

@@ -1,5 +1,6 @@
-import { heatBands, isotherms } from '#core/drawing/heat-bands.ts';
+import { heatBands, type Isotherm, isotherms } from '#core/drawing/heat-bands.ts';
 import { isothermLabels } from '#core/drawing/isotherm-label.ts';
+import type { LabelBox } from '#core/drawing/place-labels.ts';
 import { formatGiven, formatNumber } from '#core/format.ts';
 import { polygonContains } from '#core/geometry/polygon.ts';
 import type { RecordBlock, RecordHeat } from '#core/record/record-document.ts';
@@ -18,7 +19,7 @@ import {
   traceRing,
 } from './board-view.ts';
 import { drawHeatScale, heatScaleWidth } from './heat-scale-bar.ts';
-import { drawParts, drawVias } from './parts.ts';
+import { type DrawnParts, drawParts, drawVias } from './parts.ts';
 
 const titleHeight = lineHeight(9.5) + 3;
 const gap = 14;
@@ -102,41 +103,46 @@ function drawBands(sheet: Sheet, view: BoardView, { board, field, layer, scale, 
   pdf.restore();
 }
 
-type Box = { x: number; y: number; width: number; height: number };
-
 /** Temperatures at the isotherms, limits first, where neither a part nor its text stands. */
-function drawFigures(sheet: Sheet, view: BoardView, drawing: RecordHeat, occupied: readonly Box[]) {
+function drawFigures(sheet: Sheet, view: BoardView, drawing: RecordHeat, { texts, parts }: DrawnParts) {
   const { board, field, layer, scale, limits } = drawing;
   const size = 6.4;
-  const onBoard = ([px, py]: readonly [number, number]) => {
-    const [x, y] = [view.x(px), view.y(py)];
-    const inside =
-      x > view.left + 9 && x < view.left + view.width - 9 && y > view.top + 6 && y < view.top + view.height - 6;
-    return (
-      inside &&
-      polygonContains(board.outline.points, px, py) &&
-      !board.outline.cutouts.some((ring) => polygonContains(ring, px, py))
-    );
-  };
-  const free = (point: readonly [number, number]) => {
-    const [x, y] = [view.x(point[0]), view.y(point[1])];
-    const clear = occupied.every(
-      (box) => x < box.x - 9 || x > box.x + box.width + 9 || y < box.y - 5 || y > box.y + box.height + 5,
-    );
-    return clear && onBoard(point);
-  };
-  const limitLines = isotherms(
-    field,
-    layer,
-    limits.map(({ valueC }) => valueC),
-  );
-  const lines = [...limitLines, ...isotherms(field, layer, scale.levels.slice(1))];
-  const named = (point: readonly [number, number], line: { valueC: number }) =>
-    limitLines.some(({ valueC }) => valueC === line.valueC) && onBoard(point);
-  for (const { valueC, at } of isothermLabels(lines, free, 24 / view.pointsPerMm, named)) {
-    const text = limits.some((limit) => limit.valueC === valueC) ? `limit ${formatGiven(valueC)}` : formatGiven(valueC);
+  const onBoard = ([x, y]: Mm) =>
+    isClear([view.x(x), view.y(y)], [], view) &&
+    polygonContains(board.outline.points, x, y) &&
+    !board.outline.cutouts.some((ring) => polygonContains(ring, x, y));
+  const clearOf = (boxes: readonly LabelBox[]) => (point: Mm) =>
+    onBoard(point) && isClear([view.x(point[0]), view.y(point[1])], boxes, view);
+  const limitsC = limits.map(({ valueC }) => valueC);
+  const levels = scale.levels.slice(1).filter((level) => !limitsC.includes(level));
+  const limitLines = isotherms(field, layer, limitsC);
+  const lines = [...limitLines, ...isotherms(field, layer, levels)];
+  // A limit is named over a part if need be, but never over a text.
+  const clearOfTexts = clearOf(texts);
+  const overParts = (point: Mm, line: Isotherm) => limitLines.includes(line) && clearOfTexts(point);
+  for (const { valueC, at } of isothermLabels(lines, clearOf([...texts, ...parts]), 28 / view.pointsPerMm, overParts)) {
+    const text = limitsC.includes(valueC) ? `limit ${formatGiven(valueC)}` : formatGiven(valueC);
     const plate = plateSize(sheet, text, size);
     const x = view.x(at[0]) - plate.width / 2;
     drawPlate(sheet, text, { x, y: view.y(at[1]) - plate.height / 2, ...plate }, size);
   }
+}
+
+type Mm = readonly [number, number];
+
+/** Whether a figure centred on a point of the page stays inside the drawing and off the boxes. */
+function isClear([x, y]: readonly [number, number], boxes: readonly LabelBox[], view: BoardView): boolean {
+  const [reachX, reachY] = [18, 6];
+  const inside =
+    x > view.left + reachX &&
+    x < view.left + view.width - reachX &&
+    y > view.top + reachY &&
+    y < view.top + view.height - reachY;
+  return (
+    inside &&
+    boxes.every(
+      (box) =>
+        x < box.x - reachX || x > box.x + box.width + reachX || y < box.y - reachY || y > box.y + box.height + reachY,
+    )
+  );
 }

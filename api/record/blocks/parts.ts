@@ -14,8 +14,10 @@ type Options = {
   size: number;
 };
 
-/** Lands, bodies and probes, with a text beside each part that hides none of them. @returns where the texts stand */
-export function drawParts(sheet: Sheet, view: BoardView, board: Board, { side, label, size }: Options): LabelBox[] {
+export type DrawnParts = { texts: readonly LabelBox[]; parts: readonly LabelBox[] };
+
+/** Lands, bodies and probes, with a text beside each part that hides none of them. @returns where texts and parts stand */
+export function drawParts(sheet: Sheet, view: BoardView, board: Board, { side, label, size }: Options): DrawnParts {
   const { pdf } = sheet;
   const parts = partRings(board);
   for (const part of parts) {
@@ -49,7 +51,7 @@ export function drawParts(sheet: Sheet, view: BoardView, board: Board, { side, l
   const bounds = { x: view.left + 1, y: view.top + 1, width: view.width - 2, height: view.height - 2 };
   const places = placeLabels(named, bounds, boxes);
   places.forEach((place, index) => drawPlate(sheet, named[index]!.text, place, size));
-  return [...places, ...boxes];
+  return { texts: places, parts: boxes };
 }
 
 export function drawVias({ pdf }: Sheet, view: BoardView, board: Board, layer: string): void {

@@ -1,6 +1,6 @@
 import { formatNumber, formatQuantity } from '#core/format.ts';
 import { governingByRegulator } from '../governing.ts';
-import { limitValue, marginText, quantityWords, shortQuantityWords } from '../limit-words.ts';
+import { limitValue, marginText, shortQuantityWords } from '../limit-words.ts';
 import type { RecordBlock, RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
@@ -80,7 +80,7 @@ function exceedances(result: RecordInput['result']): RecordBlock[] {
         .map((limit) => [
           ref,
           condition.name,
-          quantityWords[limit.quantity],
+          shortQuantityWords[limit.quantity],
           limitValue(limit.quantity, limit.actual),
           limitValue(limit.quantity, limit.limit),
           marginText({ ...limit, margin: limit.margin === null ? null : -limit.margin }),
@@ -111,7 +111,7 @@ function exceedances(result: RecordInput['result']): RecordBlock[] {
       columns: [
         { title: 'Part', weight: 0.8 },
         { title: 'Condition', weight: 2 },
-        { title: 'Quantity', weight: 1.5 },
+        { title: 'Quantity', weight: 1.4 },
         { title: 'Actual', weight: 1, align: 'right' },
         { title: 'Limit', weight: 1, align: 'right' },
         { title: 'Over by', weight: 1, align: 'right' },
