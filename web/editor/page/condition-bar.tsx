@@ -2,10 +2,10 @@ import { VerdictMark } from '#web/ui/verdict-mark.tsx';
 import { activeCheck } from '../canvas/use-heat-picture.ts';
 import { AirForm } from '../condition/air-form.tsx';
 import { useEditor, useEditorStore } from '../editor-context.ts';
-import { shownBoard } from '../editor-store.ts';
+import { shownBoard, isDirty } from '../editor-store.ts';
 import { isCurrent } from '../solve/checks.ts';
 import { BarSelect } from './bar-field.tsx';
-import { RunCheck } from './run-check.tsx';
+import { RunCheck } from '#web/revision/run-check.tsx';
 
 type Props = { revisionId: string; maySolve: boolean; flush: () => Promise<void> };
 
@@ -14,6 +14,7 @@ export function ConditionBar({ revisionId, maySolve, flush }: Props) {
   const store = useEditorStore();
   const conditions = useEditor((state) => state.board.conditions);
   const active = useEditor((state) => state.activeCondition);
+  const dirty = useEditor(isDirty);
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-1 border-b border-line px-2 py-1.5 sm:px-4">
       {active === null ? (
@@ -31,7 +32,7 @@ export function ConditionBar({ revisionId, maySolve, flush }: Props) {
         </>
       )}
       <div className="ml-auto">
-        <RunCheck revisionId={revisionId} maySolve={maySolve} flush={flush} />
+        <RunCheck revisionId={revisionId} maySolve={maySolve} dirty={dirty} flush={flush} />
       </div>
     </div>
   );

@@ -7,18 +7,22 @@ import { announce } from '#web/ui/announce.ts';
 import { Button } from '#web/ui/button.tsx';
 import { VerdictMark } from '#web/ui/verdict-mark.tsx';
 import { verdictWords } from '#web/ui/verdict-words.ts';
-import { useEditor } from '../editor-context.ts';
-import { isDirty } from '../editor-store.ts';
-import { timeText } from '../saving/time-text.ts';
+import { timeText } from '#web/editor/saving/time-text.ts';
 
-type Props = { revisionId: string; maySolve: boolean; flush: () => Promise<void> };
+type Props = {
+  revisionId: string;
+  maySolve: boolean;
+  /** Whether the page holds changes that are not saved. */
+  dirty: boolean;
+  /** Saves them. */
+  flush: () => Promise<void>;
+};
 
 /** The server's check of the saved sketch: the number that counts for review and record. */
-export function RunCheck({ revisionId, maySolve, flush }: Props) {
+export function RunCheck({ revisionId, maySolve, dirty, flush }: Props) {
   const client = useQueryClient();
   const [jobId, setJobId] = useState<string | null>(null);
   const stored = useQuery(resultQuery(revisionId));
-  const dirty = useEditor(isDirty);
   const job = useQuery({ ...jobQuery(revisionId, jobId ?? ''), enabled: jobId !== null });
   const start = useMutation({
     mutationFn: async () => {
