@@ -1,20 +1,12 @@
 import { describe, expect, test } from 'vitest';
-import { type Board, boardDocument, type BoardDocument } from '#core/board/document.ts';
+import type { Board, BoardDocument } from '#core/board/document.ts';
 import { findAll } from '#core/derating/find-all.ts';
 import { smallDocument } from '../board/small-board.ts';
 import { contextOf } from './context-of.ts';
+import { ringAt, soundBoard } from './sound-board.ts';
 
-const rules = [{ quantity: 'junctionC' as const, belowMaxK: 25, source: 'tests' }];
-
-/** The small board with a junction rule and enough copper: nothing is found on it. */
-function sound(change: (document: BoardDocument) => void = () => undefined): Board {
-  const document = structuredClone({ ...smallDocument, criteria: { name: 'Tests', rules } });
-  change(document);
-  return boardDocument.parse(document);
-}
-
-const found = (board: Board, solved?: Parameters<typeof contextOf>[1]) =>
-  findAll(contextOf(board, solved)).map(({ severity, rule, ref }) => `${severity} ${rule} ${ref}`);
+const found = (board: Board) =>
+  findAll(contextOf(board)).map(({ severity, rule, ref }) => `${severity} ${rule} ${ref}`);
 
 const second = (at: [number, number], ref = 'U2') => ({ ...smallDocument.regulators[0]!, ref, at, dropper: null });
 const via = {
@@ -55,7 +47,7 @@ const strip = {
 };
 
 test('findAll – a sound board – nothing', () => {
-  expect(found(sound())).toEqual([]);
+  expect(found(soundBoard())).toEqual([]);
 });
 
 describe('findAll – one thing wrong – its finding, and no other', () => {
@@ -140,7 +132,7 @@ describe('findAll – one thing wrong – its finding, and no other', () => {
       'note dropper-not-placed U1',
     ],
   ])('%s', (_, change, expected) => {
-    expect(found(sound(change))).toEqual([expected]);
+    expect(found(soundBoard(change))).toEqual([expected]);
   });
 
   test.each<[string, (document: BoardDocument) => void, string]>([
@@ -159,7 +151,7 @@ describe('findAll – one thing wrong – its finding, and no other', () => {
       'warn supply-outside-range VIN',
     ],
   ])('%s – in both conditions', (_, change, expected) => {
-    expect(found(sound(change))).toEqual([expected, expected]);
+    expect(found(soundBoard(change))).toEqual([expected, expected]);
   });
 });
 
@@ -186,12 +178,12 @@ describe('findAll – just not wrong – nothing', () => {
     // 14.5 V would be passed without the resistor, and 1 mA · 10 Ω keep 15 V at 14.99 V.
     ['input at its maximum with no load', (d) => (d.parts.five!.inputMaxV = 14.99)],
   ])('%s', (_, change) => {
-    expect(found(sound(change))).toEqual([]);
+    expect(found(soundBoard(change))).toEqual([]);
   });
 });
 
 test('findAll – leads that share a land of no net, under a pour – nothing, as their nets are not stated', () => {
-  const board = sound((document) => {
+  const board = soundBoard((document) => {
     document.packages.box!.lands.push({
       name: 'leads',
       kind: 'lead',
@@ -203,7 +195,7 @@ test('findAll – leads that share a land of no net, under a pour – nothing, a
 });
 
 test('findAll – a tab of the output net, its pour on ground – named with both nets and a remedy', () => {
-  const board = sound((document) => (document.parts.five!.landNets = { tab: 'output' }));
+  const board = soundBoard((document) => (document.parts.five!.landNets = { tab: 'output' }));
   const [finding] = findAll(contextOf(board));
   expect(finding).toMatchObject({
     rule: 'tab-net-mismatch',
@@ -214,7 +206,7 @@ test('findAll – a tab of the output net, its pour on ground – named with bot
 
 test('findAll – series resistor and a load beyond the peak – hottest below its load', () => {
   // (15 − 10·0.001 − 4.9)/(2 · 100 Ω) = 50 mA, below the load of 100 mA; the low line is kept from being starved.
-  const board = sound((document) => {
+  const board = soundBoard((document) => {
     document.regulators[0]!.dropper = { resistanceOhm: 100, source: 'R1' };
     document.supplies = [{ name: 'VIN', minV: 20, nominalV: 20, maxV: 20 }];
     document.conditions.forEach((condition) => (condition.loadsA = { U1: 0.1 }));
@@ -224,40 +216,8 @@ test('findAll – series resistor and a load beyond the peak – hottest below i
   expect(finding?.message).toBe('With its series resistor U1 is hottest at 0.075 A, below its load of 0.100 A.');
 });
 
-describe('findAll – what only the temperatures show', () => {
-  const twice = (finding: string) => [finding, finding];
-
-  test('laminate above its maximum operating temperature – warn; at it – nothing', () => {
-    expect(found(sound(), { maxC: 130.1 })).toEqual(twice('warn laminate-over null'));
-    expect(found(sound(), { maxC: 130 })).toEqual([]);
-  });
-
-  test('a regulator that reaches its shutdown – warn', () => {
-    expect(found(sound(), { regulators: [{ ref: 'U1', shutsDown: true }] })).toEqual(twice('warn shutdown-cycling U1'));
-  });
-
-  test('little margin in a corner – note; the same margin in the middle – nothing', () => {
-    const limit = { quantity: 'junctionC' as const, actual: 111, limit: 125, margin: 14, ratio: null, source: 'tests' };
-    const tight = { regulators: [{ ref: 'U1', limits: [{ ...limit, verdict: 'within' as const }] }] };
-    const cornered = sound((document) => {
-      document.regulators[0]!.at = [5, 5];
-      document.pours[0]!.points = ringAt(5, 5);
-    });
-    expect(found(cornered, tight)).toEqual(['note near-corner U1']);
-    expect(found(sound(), tight)).toEqual([]);
-  });
-
-  test('heat that lies off the board – stop; a range left – note', () => {
-    const notices = [
-      { code: 'source-off-board', ref: 'R1', message: 'off' },
-      { code: 'rise-range', ref: null, message: 'far' },
-    ];
-    expect(new Set(found(sound(), { notices }))).toEqual(new Set(['stop source-off-board R1', 'note rise-range null']));
-  });
-});
-
 test('findAll – several – stops first, then warnings, then notes', () => {
-  const board = sound((document) => {
+  const board = soundBoard((document) => {
     document.conditions.pop();
     document.regulators.push(second([10.5, 10]));
     document.conditions[0]!.loadsA = { U1: 0.1, U2: 0.1 };
@@ -265,15 +225,6 @@ test('findAll – several – stops first, then warnings, then notes', () => {
   });
   expect(found(board)).toEqual(['stop parts-overlap U1', 'warn one-condition null', 'note dropper-not-placed U1']);
 });
-
-function ringAt(x: number, y: number): [number, number][] {
-  return [
-    [x - 4, y - 4],
-    [x + 4, y - 4],
-    [x + 4, y + 4],
-    [x - 4, y + 4],
-  ];
-}
 
 const frameOfAnotherNet: BoardDocument['pours'][number] = {
   id: 'p9',

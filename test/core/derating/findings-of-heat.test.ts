@@ -1,0 +1,44 @@
+import { describe, expect, test } from 'vitest';
+import type { Board } from '#core/board/document.ts';
+import { findAll } from '#core/derating/find-all.ts';
+import { contextOf } from './context-of.ts';
+import { ringAt, soundBoard } from './sound-board.ts';
+
+const found = (board: Board, solved?: Parameters<typeof contextOf>[1]) =>
+  findAll(contextOf(board, solved)).map(({ severity, rule, ref }) => `${severity} ${rule} ${ref}`);
+
+describe('findAll – what only the temperatures show', () => {
+  const twice = (finding: string) => [finding, finding];
+
+  test('laminate above its maximum operating temperature – warn; at it – nothing', () => {
+    expect(found(soundBoard(), { maxC: 130.1 })).toEqual(twice('warn laminate-over null'));
+    expect(found(soundBoard(), { maxC: 130 })).toEqual([]);
+  });
+
+  test('a regulator that reaches its shutdown – warn', () => {
+    expect(found(soundBoard(), { regulators: [{ ref: 'U1', shutsDown: true }] })).toEqual(
+      twice('warn shutdown-cycling U1'),
+    );
+  });
+
+  test('little margin in a corner – note; the same margin in the middle – nothing', () => {
+    const limit = { quantity: 'junctionC' as const, actual: 111, limit: 125, margin: 14, ratio: null, source: 'tests' };
+    const tight = { regulators: [{ ref: 'U1', limits: [{ ...limit, verdict: 'within' as const }] }] };
+    const cornered = soundBoard((document) => {
+      document.regulators[0]!.at = [5, 5];
+      document.pours[0]!.points = ringAt(5, 5);
+    });
+    expect(found(cornered, tight)).toEqual(['note near-corner U1']);
+    expect(found(soundBoard(), tight)).toEqual([]);
+  });
+
+  test('heat that lies off the board – stop; a range left – note', () => {
+    const notices = [
+      { code: 'source-off-board', ref: 'R1', message: 'off' },
+      { code: 'rise-range', ref: null, message: 'far' },
+    ];
+    expect(new Set(found(soundBoard(), { notices }))).toEqual(
+      new Set(['stop source-off-board R1', 'note rise-range null']),
+    );
+  });
+});
