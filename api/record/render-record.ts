@@ -39,7 +39,7 @@ const titleHeight = lineHeight(title.size) + 4;
 function drawSection(sheet: Sheet, { title: words, blocks }: RecordSection, number: number) {
   ensure(sheet, 8 + titleHeight + leadOf(sheet, blocks, 0));
   if (sheet.y > sheet.top) sheet.y += 8;
-  const bookmark = sheet.pdf.outline.addItem(`${number}  ${words}`);
+  const bookmark = sheet.pdf.outline.addItem(`${number} ${words}`);
   group(sheet, 'Sect', () => {
     tagged(sheet, 'H2', () => writeLines(sheet, [`${number}  ${words}`], sheet.left, sheet.y, sheet.width, title));
     sheet.y += titleHeight;
