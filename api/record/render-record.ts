@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import type { RecordBlock, RecordDocument, RecordSection } from '#core/record/record-document.ts';
 import type { BlockSetter } from './block.ts';
 import { copperSetter } from './blocks/copper.ts';
@@ -10,7 +11,7 @@ import { headingSetter, listSetter, textSetter } from './blocks/text.ts';
 import { drawFeet } from './feet.ts';
 import { drawHeader, subjectOf } from './header.ts';
 import { ensure, openSheet, type Paper, type Sheet } from './sheet.ts';
-import { group, tagged } from './structure.ts';
+import { openGroup, tagged } from './structure.ts';
 import { lineHeight, writeLines } from './typeset.ts';
 
 /**
@@ -26,7 +27,7 @@ export async function renderRecord(record: RecordDocument, paper: Paper): Promis
   });
   const finished = collect(sheet.pdf);
   drawHeader(sheet, header);
-  record.sections.forEach((section, index) => drawSection(sheet, section, index + 1));
+  for (const [index, section] of record.sections.entries()) await drawSection(sheet, section, index + 1);
   drawFeet(sheet, header);
   sheet.parent.end();
   sheet.pdf.end();
@@ -36,21 +37,23 @@ export async function renderRecord(record: RecordDocument, paper: Paper): Promis
 const title = { face: 'semibold', size: 13 } as const;
 const titleHeight = lineHeight(title.size) + 4;
 
-function drawSection(sheet: Sheet, { title: words, blocks }: RecordSection, number: number) {
+async function drawSection(sheet: Sheet, { title: words, blocks }: RecordSection, number: number) {
   ensure(sheet, 8 + titleHeight + leadOf(sheet, blocks, 0));
   if (sheet.y > sheet.top) sheet.y += 8;
   const bookmark = sheet.pdf.outline.addItem(`${number} ${words}`);
-  group(sheet, 'Sect', () => {
-    tagged(sheet, 'H2', () => writeLines(sheet, [`${number}  ${words}`], sheet.left, sheet.y, sheet.width, title));
-    sheet.y += titleHeight;
-    blocks.forEach((block, index) => {
-      if (block.kind === 'heading') {
-        ensure(sheet, leadOf(sheet, blocks, index));
-        bookmark.addItem(block.text);
-      }
-      drawBlock(sheet, block);
-    });
-  });
+  const close = openGroup(sheet, 'Sect');
+  tagged(sheet, 'H2', () => writeLines(sheet, [`${number}  ${words}`], sheet.left, sheet.y, sheet.width, title));
+  sheet.y += titleHeight;
+  for (const [index, block] of blocks.entries()) {
+    if (block.kind === 'heading') {
+      ensure(sheet, leadOf(sheet, blocks, index));
+      bookmark.addItem(block.text);
+    }
+    setterOf(block).draw(sheet);
+    // A long record takes seconds; whoever else waits for this process is served in between.
+    await setImmediate();
+  }
+  close();
 }
 
 /**
@@ -63,10 +66,6 @@ function leadOf(sheet: Sheet, blocks: readonly RecordBlock[], index: number): nu
   const next = blocks[index + 1]?.kind;
   const leadsIn = block.kind === 'heading' || (block.kind === 'text' && next !== 'text' && next !== 'heading');
   return setterOf(block).lead(sheet) + (leadsIn ? leadOf(sheet, blocks, index + 1) : 0);
-}
-
-function drawBlock(sheet: Sheet, block: RecordBlock) {
-  setterOf(block).draw(sheet);
 }
 
 function setterOf(block: RecordBlock): { lead(sheet: Sheet): number; draw(sheet: Sheet): void } {

@@ -15,15 +15,23 @@ export function tagged(sheet: Sheet, type: StructureType, draw: () => void, alt?
   element.end();
 }
 
-/** An element that holds what is tagged within. */
-export function group(sheet: Sheet, type: StructureType, draw: () => void): void {
+/** An element that holds what is tagged until it is closed. @returns what closes it */
+export function openGroup(sheet: Sheet, type: StructureType): () => void {
   const outer = sheet.parent;
   const element = sheet.pdf.struct(type);
   outer.add(element);
   sheet.parent = element;
+  return () => {
+    sheet.parent = outer;
+    element.end();
+  };
+}
+
+/** An element that holds what is tagged within. */
+export function group(sheet: Sheet, type: StructureType, draw: () => void): void {
+  const close = openGroup(sheet, type);
   draw();
-  sheet.parent = outer;
-  element.end();
+  close();
 }
 
 /** Rules, frames, feet and repeated heads: seen, but no part of what is read out. */

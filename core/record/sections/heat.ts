@@ -113,5 +113,9 @@ function limitsOf(board: Board, condition: ConditionResult): { label: string; va
     if (limit !== null && limit !== undefined) add(limit, regulator.ref);
   }
   add(board.stackup.maxOperatingC, 'laminate');
-  return [...byValue].toSorted(([a], [b]) => a - b).map(([valueC, names]) => ({ valueC, label: names.join(', ') }));
+  return [...byValue].toSorted(([a], [b]) => a - b).map(([valueC, names]) => ({ valueC, label: shortList(names) }));
+}
+
+function shortList(names: readonly string[]): string {
+  return names.length > 4 ? `${names.slice(0, 3).join(', ')} and ${names.length - 3} more` : names.join(', ');
 }

@@ -17,7 +17,8 @@ export function summarySection({ board, result, revision }: RecordInput): Record
   const rows = board.regulators.map(({ ref, part }) => {
     const found = governing.get(ref);
     const limit = found?.limit ?? null;
-    const band = limit?.quantity === 'junctionC' ? found?.regulator.uncertaintyK : null;
+    const isJunction = limit?.quantity === 'junctionC' && limit.actual !== null;
+    const band = isJunction ? found?.regulator.uncertaintyK : null;
     return [
       ref,
       board.parts[part]?.name ?? part,
