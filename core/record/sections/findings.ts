@@ -3,6 +3,8 @@ import { formatTime } from '../format-time.ts';
 import type { RecordBlock, RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
+const withoutReason = { stop: 'has to be mended', warn: 'none given', note: 'none needed' } as const;
+
 /** Findings with the reasons given for them, and the comments of the review with what became of them. */
 export function findingsSection({ result, revision }: RecordInput): RecordSection {
   const blocks: RecordBlock[] = [
@@ -18,8 +20,7 @@ export function findingsSection({ result, revision }: RecordInput): RecordSectio
         finding.severity,
         [finding.ref, finding.condition].filter(Boolean).join(', ') || 'whole board',
         `${finding.message} ${finding.remedy}`.trim(),
-        revision?.reasons.find((reason) => sameFinding(reason, finding))?.reason ??
-          (finding.severity === 'warn' ? 'none given' : 'none needed'),
+        revision?.reasons.find((reason) => sameFinding(reason, finding))?.reason ?? withoutReason[finding.severity],
       ]),
       empty: 'Nothing was found.',
     },

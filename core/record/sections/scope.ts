@@ -61,6 +61,9 @@ function limitless(board: Board): string[] {
   const refs = board.sources.filter(({ limitC }) => limitC === null).map(({ ref }) => ref);
   const judged = board.criteria.rules.some(({ quantity }) => quantity === 'junctionC');
   return [
+    ...(board.regulators.length === 0
+      ? ['The board has no regulator: its heat was solved, but nothing was derated.']
+      : []),
     ...(refs.length > 0 ? [`No temperature limit is stated for ${refs.join(', ')}: heated, but not judged.`] : []),
     ...(judged || board.regulators.length === 0
       ? []

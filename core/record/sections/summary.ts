@@ -59,7 +59,7 @@ export function summarySection({ board, result, revision }: RecordInput): Record
         rows,
         empty: 'The board has no regulator, so there is no verdict; its heat was solved all the same.',
       },
-      ...exceedances(result),
+      ...exceedances(board, result),
       ...(result.cautions.length > 0
         ? [
             {
@@ -73,7 +73,7 @@ export function summarySection({ board, result, revision }: RecordInput): Record
 }
 
 /** Every limit that is exceeded, in every condition: none of them may go unseen behind a governing one. */
-function exceedances(result: RecordInput['result']): RecordBlock[] {
+function exceedances({ stackup }: RecordInput['board'], result: RecordInput['result']): RecordBlock[] {
   const rows = result.conditions.flatMap((condition) => [
     ...condition.regulators.flatMap(({ ref, limits }) =>
       limits
@@ -99,6 +99,19 @@ function exceedances(result: RecordInput['result']): RecordBlock[] {
         formatQuantity(temperatureC === null || limitC === null ? null : temperatureC - limitC, 'K'),
         'limit stated for this part',
       ]),
+    ...(condition.board && condition.board.maxC > stackup.maxOperatingC
+      ? [
+          [
+            'Laminate',
+            condition.name,
+            'Hottest place',
+            formatQuantity(condition.board.maxC, '°C'),
+            formatQuantity(stackup.maxOperatingC, '°C'),
+            formatQuantity(condition.board.maxC - stackup.maxOperatingC, 'K'),
+            'maximum operating temperature of the laminate',
+          ],
+        ]
+      : []),
   ]);
   if (rows.length === 0) return [];
   return [

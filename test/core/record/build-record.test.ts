@@ -39,6 +39,14 @@ test('record – every exceedance of every condition – listed by name, with it
   expect(wordsOf(record, 'cautions')).not.toContain('"kind":"caution"');
 });
 
+test('record – laminate hotter than its maximum operating temperature – an exceedance, whatever the regulators say', () => {
+  // The small board states 130 °C.
+  const board = { maxC: 141.5, maxAt: [30, 22] as [number, number], meanC: 70 };
+  const condition = sampleCondition('Hot', [sampleRegulator('U1', {})], { board });
+  const summary = wordsOf(buildRecord(sampleRecord({ result: sampleResult([condition]) })), 'summary');
+  expect(summary).toContain('"Laminate","Hot","Hottest place","141.5\u00a0°C","130.0\u00a0°C","11.5\u00a0K"');
+});
+
 test('record – values that could not be evaluated – open points name them, and nothing prints NaN, null or undefined', () => {
   const open = sampleRegulator('U1', {
     dissipationW: null,
