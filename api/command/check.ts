@@ -1,10 +1,9 @@
 import { writeFile } from 'node:fs/promises';
 import { parseArgs } from 'node:util';
-import type { Board } from '#core/board/document.ts';
 import { readBoard } from '#core/board/read-board.ts';
 import { checkBoard } from '#core/check/check-board.ts';
-import type { CheckResult } from '#core/result/result.ts';
 import { BoardTooLarge } from '#core/thermal/cell-grid.ts';
+import { exitCodeOf } from './exit-code-of.ts';
 import { exitCodes } from './exit-codes.ts';
 import { print, printError } from './print.ts';
 import { readInput } from './read-input.ts';
@@ -33,7 +32,7 @@ export async function check(words: readonly string[]): Promise<number> {
   const unknown = options.conditions?.find((name) => !board.conditions.some((condition) => condition.name === name));
   if (unknown !== undefined) {
     const names = board.conditions.map((condition) => `"${condition.name}"`).join(', ') || 'none';
-    return await refuse([{ path: 'conditions', message: `has no condition "${unknown}"; there is ${names}` }]);
+    return await refuse([{ path: '--condition', message: `there is no condition "${unknown}"; there is ${names}` }]);
   }
   try {
     const { result, fields } = checkBoard(board, assumptions, {
@@ -56,16 +55,6 @@ export async function check(words: readonly string[]): Promise<number> {
     }
     throw error;
   }
-}
-
-function exitCodeOf(board: Board, result: CheckResult): number {
-  if (result.conditions.some((condition) => condition.status !== 'converged')) return exitCodes.notConverged;
-  if (result.verdict === 'within' || result.verdict === 'close') return exitCodes.fine;
-  const solvedOnly = board.regulators.length === 0 && result.conditions.length > 0;
-  const sourceOver = result.conditions.some((condition) =>
-    condition.sources.some((source) => source.verdict === 'over'),
-  );
-  return solvedOnly && !sourceOver ? exitCodes.fine : exitCodes.over;
 }
 
 async function refuse(faults: readonly { path: string; message: string }[]): Promise<number> {

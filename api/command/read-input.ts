@@ -1,5 +1,6 @@
 import { readFile } from 'node:fs/promises';
 import { text } from 'node:stream/consumers';
+import { jsonFaultAt } from './json-fault-at.ts';
 
 /** A file, or standard input for "-", as parsed JSON. Faults name line and column. */
 export async function readInput(file: string): Promise<{ value: unknown } | { fault: string }> {
@@ -15,18 +16,18 @@ export async function readInput(file: string): Promise<{ value: unknown } | { fa
     };
     return { fault: `${file} ${reasons[code ?? ''] ?? `cannot be read (${code})`}` };
   }
+  const json = source.replace(/^\uFEFF/, '');
   try {
-    return { value: JSON.parse(source.replace(/^\uFEFF/, '')) };
-  } catch (error) {
-    return {
-      fault: `${file === '-' ? 'standard input' : file} is not JSON${placeOf(source, (error as Error).message)}`,
-    };
+    return { value: JSON.parse(json) };
+  } catch {
+    return { fault: `${file === '-' ? 'standard input' : file} is not JSON${placeOf(json)}` };
   }
 }
 
-function placeOf(source: string, message: string): string {
-  const position = /position (\d+)/.exec(message)?.[1];
-  if (position === undefined) return source.trim() === '' ? ': it is empty' : ': it ends too early';
-  const before = source.slice(0, Number(position)).split('\n');
+function placeOf(source: string): string {
+  const position = jsonFaultAt(source);
+  if (source.trim() === '') return ': it is empty';
+  if (position === null || position === source.length) return ': it ends too early';
+  const before = source.slice(0, position).split('\n');
   return `, line ${before.length}, column ${before.at(-1)!.length + 1}`;
 }

@@ -25,11 +25,16 @@ export function conjugateGradients(
 ): IterationRecord {
   const { r, z, p, q } = options.work;
   const target = options.tolerance * norm(b);
+  if (target === 0) {
+    // Without heat the answer is known, and a residual relative to nothing could never be met.
+    x.fill(0);
+    return { status: 'converged', iterations: 0, residual: 0 };
+  }
   let iterations = 0;
   for (let restart = 0; restart < 4; restart++) {
     system.multiply(x, q);
     for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
-    if (norm(r) <= target || target === 0) break;
+    if (norm(r) <= target) break;
     let rho = 0;
     for (let step = 0; iterations < options.maximumIterations; step++) {
       system.precondition(r, z);
@@ -69,8 +74,7 @@ export function conjugateWork(length: number): ConjugateWork {
 function residualOf(system: LinearSystem, b: Float64Array, x: Float64Array, { r, q }: ConjugateWork): number {
   system.multiply(x, q);
   for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
-  const scale = norm(b);
-  return scale === 0 ? norm(r) : norm(r) / scale;
+  return norm(r) / norm(b);
 }
 
 function dot(a: Float64Array, b: Float64Array): number {
