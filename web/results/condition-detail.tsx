@@ -38,7 +38,7 @@ export function ConditionDetail({ revisionId, solvedAt, condition, conditions, b
         </div>
       </div>
       {condition.status === 'converged' ? (
-        <div className="grid gap-8 xl:grid-cols-[3fr_2fr]">
+        <div className="flex flex-col gap-8">
           {upToDate ? (
             <HeatPicture revisionId={revisionId} solvedAt={solvedAt} condition={condition} board={board} />
           ) : (
