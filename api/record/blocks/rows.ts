@@ -34,7 +34,7 @@ export function drawRows(
     rows.forEach((row, index) => {
       let cells: SetCell[] | null = row.map((cell, k) => setCell(sheet, layout, cell, k));
       const first = index === 0;
-      const broken = ensure(sheet, heightOf(layout, cells, pageRoom) + (first ? headHeight : 0));
+      const broken = ensure(sheet, needOf(heightOf(layout, cells), pageRoom) + (first ? headHeight : 0));
       if (headCells && (first || broken)) drawHead(sheet, layout, headCells, headHeight, first);
       while (cells) {
         const most = Math.max(1, Math.floor((sheet.bottom - sheet.y - 2 * padY) / lineHeight(layout.size)));
@@ -51,18 +51,34 @@ export function drawRows(
   });
 }
 
-/** Height of the head and the first rows. */
+/** Height of the head and the first row, and of the second where both are low. */
 export function leadOfRows(
   sheet: Sheet,
   layout: RowLayout,
   head: readonly string[] | null,
   rows: readonly (readonly RecordCell[])[],
 ): number {
-  const room = (sheet.bottom - sheet.top) / 3;
-  const heads = head ? [head.map((title, k) => setCell(sheet, layout, title, k, 'semibold'))] : [];
-  const bodies = rows.map((row) => row.map((cell, k) => setCell(sheet, layout, cell, k)));
-  return [...heads, ...bodies].reduce((sum, cells) => sum + heightOf(layout, cells, room), 0);
+  const headHeight = head
+    ? heightOf(
+        layout,
+        head.map((title, k) => setCell(sheet, layout, title, k, 'semibold')),
+      )
+    : 0;
+  const pageRoom = sheet.bottom - sheet.top - headHeight;
+  const [first = 0, second = 0] = rows.slice(0, 2).map((row) =>
+    needOf(
+      heightOf(
+        layout,
+        row.map((cell, k) => setCell(sheet, layout, cell, k)),
+      ),
+      pageRoom,
+    ),
+  );
+  return headHeight + (first + second < pageRoom / 4 ? first + second : first);
 }
+
+/** Room that a row needs to begin: all of its height, or a part of a page where it is higher than a page. */
+const needOf = (height: number, pageRoom: number) => (height > pageRoom ? pageRoom / 4 : height);
 
 function setCell(sheet: Sheet, layout: RowLayout, cell: RecordCell, k: number, face?: 'semibold'): SetCell {
   const column = layout.columns[k];
@@ -79,9 +95,8 @@ function setCell(sheet: Sheet, layout: RowLayout, cell: RecordCell, k: number, f
   return { lines: linesOf(sheet, text, width, style), style, verdict };
 }
 
-function heightOf(layout: RowLayout, cells: readonly SetCell[], most = Infinity): number {
-  const lines = Math.max(1, ...cells.map((cell) => cell.lines.length));
-  return Math.min(most, lines * lineHeight(layout.size) + 2 * padY);
+function heightOf(layout: RowLayout, cells: readonly SetCell[]): number {
+  return Math.max(1, ...cells.map((cell) => cell.lines.length)) * lineHeight(layout.size) + 2 * padY;
 }
 
 /** A repeated head is no part of what is read out. */
