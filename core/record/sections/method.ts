@@ -2,7 +2,7 @@ import { deference, notCovered } from '../method-limits.ts';
 import type { RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
 
-/** How the figures were made, where they hold, what they do not cover and what goes before them. */
+/** How the figures were made, where they hold, what they do not cover and what takes precedence. */
 export function methodSection({ result }: RecordInput): RecordSection {
   return {
     id: 'method',
@@ -18,7 +18,7 @@ export function methodSection({ result }: RecordInput): RecordSection {
       },
       { kind: 'heading', text: 'What the calculation does not cover' },
       { kind: 'list', items: notCovered },
-      { kind: 'heading', text: 'What goes before it' },
+      { kind: 'heading', text: 'What takes precedence' },
       ...deference.map((text) => ({ kind: 'text' as const, text })),
     ],
   };

@@ -120,7 +120,7 @@ test('record – signatures – name, meaning and time with its offset from UTC'
   expect(words).toContain('"Rolf Reviewer","Review: reviewed and cleared","2031-03-04 09:03:04 +00:00"');
 });
 
-test('record – method section – holds the standing text of what is not covered and of what goes before it', () => {
+test('record – method section – holds the standing text of what is not covered and of what takes precedence', () => {
   const words = wordsOf(buildRecord(sampleRecord()), 'method');
   for (const text of [...notCovered, ...deference]) expect(words).toContain(text);
   // 4.2 K of the rise over the local air of 6.1 + 28.2 + 3.1 = 37.4 K.
