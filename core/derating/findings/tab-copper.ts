@@ -1,5 +1,5 @@
 import type { Board } from '#core/board/document.ts';
-import { boundsOf, polygonArea, polygonContains } from '#core/geometry/polygon.ts';
+import { boundsOf, polygonArea, polygonContains, type Ring } from '#core/geometry/polygon.ts';
 import { distanceToEdge } from '#core/geometry/ring-checks.ts';
 import { placedLands } from '#core/thermal/land-placement.ts';
 import type { FindingRule } from '../finding-context.ts';
@@ -15,7 +15,7 @@ export const tabCopper: FindingRule = ({ board }) =>
       .filter(({ land }) => land.kind === 'tab')
       .filter(({ net, layer, pads }) => {
         const area = pads.reduce((sum, pad) => sum + polygonArea(pad), 0);
-        return copperNear(board, net, layer, pads) < enough * area;
+        return !hasCopperNear(board, net, layer, pads, (enough - 1) * area);
       })
       .map(({ land }) => ({
         rule: 'tab-without-copper',
@@ -27,22 +27,22 @@ export const tabCopper: FindingRule = ({ board }) =>
       })),
   );
 
-/** Copper of a net within reach of the pads, the pads' own area included, mm². */
-function copperNear(board: Board, net: string, layer: number, pads: readonly [number, number][][]): number {
+/** Whether a net has so much copper within reach of the pads, mm², their own area not counted; looks no further than needed. */
+function hasCopperNear(board: Board, net: string, layer: number, pads: readonly Ring[], areaMm2: number): boolean {
   const copper = board.stackup.copper[layer]!;
-  if (copper.plane?.net === net) return Infinity;
+  if (copper.plane?.net === net) return true;
   const pours = board.pours.filter((pour) => pour.layer === copper.name && pour.net === net);
   const all = boundsOf(pads.flat());
+  const needed = areaMm2 / (stepMm * stepMm);
   let count = 0;
   for (let x = all.minX - reachMm; x <= all.maxX + reachMm; x += stepMm) {
     for (let y = all.minY - reachMm; y <= all.maxY + reachMm; y += stepMm) {
-      const inPad = pads.some((pad) => polygonContains(pad, x, y));
-      if (!inPad && !pads.some((pad) => distanceToEdge(pad, x, y) <= reachMm)) continue;
       const covered = pours.some(
         (pour) => polygonContains(pour.points, x, y) && !pour.holes.some((hole) => polygonContains(hole, x, y)),
       );
-      if (inPad || covered) count++;
+      if (!covered || pads.some((pad) => polygonContains(pad, x, y))) continue;
+      if (pads.some((pad) => distanceToEdge(pad, x, y) <= reachMm) && ++count >= needed) return true;
     }
   }
-  return count * stepMm * stepMm;
+  return false;
 }

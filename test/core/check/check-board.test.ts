@@ -148,6 +148,17 @@ describe('checkBoard – something missing – never a pass', () => {
   });
 });
 
+test('checkBoard – no heat anywhere – solved, at the ambient', () => {
+  const board = only((document) => {
+    document.regulators[0] = { ...document.regulators[0]!, powerW: 0, feed: null, dropper: null };
+    document.sources = [];
+    document.conditions[0]!.loadsA = {};
+  });
+  const [condition] = check(board).conditions;
+  expect(condition).toMatchObject({ status: 'converged', verdict: 'within' });
+  expect(condition!.regulators[0]).toMatchObject({ junctionC: 60, thetaJaKPerW: null });
+});
+
 test('checkBoard – a known dissipation without electrical data – evaluated by its junction', () => {
   const board = only((document) => {
     document.regulators[0] = { ...document.regulators[0]!, powerW: 0.3, feed: null, dropper: null };
