@@ -1,6 +1,8 @@
 import type { Board } from '#core/board/document.ts';
 import { formatNumber } from '#core/format.ts';
-import type { CheckResult, ConditionResult, RegulatorResult } from '#core/result/result.ts';
+import type { CheckResult, ConditionResult } from '#core/result/result.ts';
+import { regulatorLines } from './regulator-lines.ts';
+import { textTable } from './text-table.ts';
 
 const number = formatNumber;
 
@@ -40,10 +42,10 @@ const section = (heading: string, lines: readonly string[]) =>
 
 function conditionLines(condition: ConditionResult): string[] {
   const lines = [`${condition.name}: ${condition.verdict}${condition.message ? ` (${condition.message})` : ''}`];
-  if (condition.regulators.length > 0) lines.push(...table(regulatorHead, condition.regulators.map(regulatorRow)));
+  lines.push(...regulatorLines(condition));
   if (condition.sources.length > 0) {
     lines.push(
-      ...table(
+      ...textTable(
         ['source', 'heat W', 'mean °C', 'max °C', 'limit °C', 'verdict'],
         condition.sources.map((source) => [
           source.ref,
@@ -58,7 +60,7 @@ function conditionLines(condition: ConditionResult): string[] {
   }
   if (condition.probes.length > 0) {
     lines.push(
-      ...table(
+      ...textTable(
         ['probe', '°C'],
         condition.probes.map((probe) => [probe.id, number(probe.temperatureC, 2)]),
       ),
@@ -73,51 +75,4 @@ function conditionLines(condition: ConditionResult): string[] {
     );
   }
   return lines;
-}
-
-const regulatorHead = [
-  'regulator',
-  'heat W',
-  'junction °C',
-  '± K',
-  'limit °C',
-  'margin K',
-  'case °C',
-  'land °C',
-  'θJA K/W',
-  'Vin V',
-  'Iout A',
-  'headroom V',
-  'verdict',
-];
-
-function regulatorRow(regulator: RegulatorResult): string[] {
-  const junction = regulator.limits
-    .filter((limit) => limit.quantity === 'junctionC' && limit.limit !== null)
-    .reduce<number | null>((least, limit) => (least === null ? limit.limit : Math.min(least, limit.limit!)), null);
-  const margin = junction === null || regulator.junctionC === null ? null : junction - regulator.junctionC;
-  return [
-    regulator.ref,
-    number(regulator.dissipationW, 3),
-    number(regulator.junctionC, 1),
-    number(regulator.uncertaintyK, 1),
-    number(junction, 1),
-    number(margin, 1),
-    number(regulator.caseTopC, 1),
-    number(regulator.landC, 1),
-    number(regulator.thetaJaKPerW, 1),
-    number(regulator.inputV, 2),
-    number(regulator.outputA, 3),
-    number(regulator.headroomV, 2),
-    regulator.verdict +
-      (regulator.shutsDown ? ', shuts down' : regulator.regulating === false ? ', out of regulation' : ''),
-  ];
-}
-
-/** Columns as wide as their widest entry; numbers to the right, the first and last column to the left. */
-function table(head: readonly string[], rows: readonly (readonly string[])[]): string[] {
-  const widths = head.map((title, k) => Math.max(title.length, ...rows.map((row) => row[k]!.length)));
-  const line = (row: readonly string[]) =>
-    `  ${row.map((cell, k) => (k === 0 || k === row.length - 1 ? cell.padEnd(widths[k]!) : cell.padStart(widths[k]!))).join('  ')}`.trimEnd();
-  return [line(head), `  ${widths.map((width) => '─'.repeat(width)).join('  ')}`, ...rows.map(line)];
 }

@@ -108,9 +108,28 @@ describe('dropwatt – words that make no sense – 2, and what is allowed', () 
 test('dropwatt check --table – for people – verdicts, units, findings and cautions in words', async () => {
   const { output, code } = await check(document(), '--table');
   expect(code).toBe(0);
-  for (const words of ['Hot: within', 'junction °C', 'margin K', '[warn] Only one operating condition', 'CAUTION ']) {
+  for (const words of ['Hot: within', 'junction °C', 'rise in K', '[warn] Only one operating condition', 'CAUTION ']) {
     expect(output).toContain(words);
   }
+});
+
+test('dropwatt check --table – an input over its rule beside a cool junction – which limit, by how much, after which source', async () => {
+  const rules = [
+    { quantity: 'junctionC' as const, belowMaxK: 25, source: 'tests' },
+    { quantity: 'inputV' as const, ratio: 0.7, source: 'voltage rule' },
+  ];
+  const { output, code } = await check(
+    document((board) => {
+      board.criteria.rules = rules;
+      board.regulators[0]!.dropper = null;
+    }),
+    '--table',
+  );
+  expect(code).toBe(1);
+  // 0.7 · 20 V = 14 V against 15 V
+  expect(output.replaceAll('\u00a0', ' ')).toContain(
+    'U1 over: input 15.00 V, limit 14.00 V, margin −1.00 V (Tests: voltage rule)',
+  );
 });
 
 test('dropwatt check --condition – one of two – that one alone', async () => {
