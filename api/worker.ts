@@ -34,7 +34,7 @@ const jobs = {
   database,
   logger,
   newId: randomUUID,
-  thread: existsSync(built) ? built : new URL('./solving/check-thread.ts', import.meta.url),
+  thread: existsSync(built) ? built : new URL('./solving/check-thread.js', import.meta.url),
   limits: { seconds: 600, megabytes: 2048 },
 };
 const mostAttempts = 3;

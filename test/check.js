@@ -10,6 +10,6 @@ const steps = [
 ];
 for (const [name, words] of steps) {
   const fine = spawnSync('npx', words, { stdio: ['ignore', 'inherit', 'inherit'] }).status === 0;
-  process.stdout.write(`${name}: ${fine ? 'green' : 'red'}\n`);
+  process.stdout.write(`${String(name)}: ${fine ? 'green' : 'red'}\n`);
   if (!fine) process.exitCode = 1;
 }

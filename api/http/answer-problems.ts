@@ -9,7 +9,7 @@ export const answerProblems: ErrorRequestHandler = (error: unknown, request, res
   const refusal = refusalOf(error);
   if (refusal.problem.status >= 500) request.log.error({ err: error }, 'request failed');
   if (refusal.retryAfterSeconds !== null) response.set('Retry-After', String(refusal.retryAfterSeconds));
-  sendProblem(response, { ...refusal.problem, instance: String(request.id) });
+  sendProblem(response, { ...refusal.problem, instance: typeof request.id === 'string' ? request.id : '' });
 };
 
 export function sendProblem(response: Response, problem: Problem): void {

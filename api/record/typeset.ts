@@ -71,7 +71,7 @@ export function widthOf(sheet: Sheet, text: string, { face = 'regular', size }: 
 
 /** The longest head of a word that fits, at least one character; never half of a surrogate pair. */
 function longestHead(word: string, fits: (words: string) => boolean): string {
-  const characters = [...word];
+  const characters = Array.from(word);
   let low = 1;
   let high = characters.length;
   while (low < high) {

@@ -26,7 +26,6 @@ export function runCheck(
     const worker = new Worker(thread, {
       workerData: { document },
       resourceLimits: { maxOldGenerationSizeMb: limits.megabytes },
-      execArgv: thread.pathname.endsWith('.ts') ? ['--import', 'tsx'] : [],
     });
     const timer = setTimeout(
       () => finish({ kind: 'refused', message: `The check took longer than ${limits.seconds} s and was ended.` }),

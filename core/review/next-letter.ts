@@ -1,6 +1,6 @@
 /** Letters not used for revisions, as they are mistaken for figures or have another meaning (common practice in drawing control). */
 const skipped = 'IOQSXZ';
-const letters = [...'ABCDEFGHIJKLMNOPQRSTUVWXYZ'].filter((letter) => !skipped.includes(letter));
+const letters = 'ABCDEFGHIJKLMNOPQRSTUVWXYZ'.split('').filter((letter) => !skipped.includes(letter));
 
 /** Letter after `letter`: A, B, … Y, AA, AB, …; the first one for null. */
 export function nextLetter(letter: string | null): string {

@@ -24,7 +24,7 @@ import { ensurePostgres, findPostgres } from './binaries.js';
  * @property {(database: string) => string} url
  * @property {boolean} wasRunning somebody else had started it
  * @property {() => boolean} hasCrashed it ended without being stopped
- * @property {() => void} restart after a crash, on the same port. @throws Error when it does not start
+ * @property {() => void} restart after a crash, on the same port; an error when it does not start
  * @property {() => void} stop
  */
 

@@ -57,6 +57,7 @@ export async function up(knex) {
     );
     create index revisions_team_id on revisions (team_id);
     create index revisions_result_id on revisions (result_id);
+    create index revisions_sketch_version on revisions (id, sketch_version);
     create index revisions_created_by on revisions (created_by);
     create index revisions_changed_by on revisions (changed_by);
 

@@ -30,7 +30,7 @@ test.each([
 
 test('.env.example – its names – are those that the program reads', () => {
   const text = readFileSync(join(import.meta.dirname, '../../.env.example'), 'utf8');
-  const named = [...text.matchAll(/^([A-Z_]+)=/gm)].map(([, name]) => name).sort();
-  const read = Object.keys(loadEnvironment({ ...fine, MAIL_SINK_FOLDER: 'mail' })).sort();
-  expect(named).toEqual(read);
+  const named = [...text.matchAll(/^([A-Z_]+)=/gm)].map(([, name]) => name);
+  const read = Object.keys(loadEnvironment({ ...fine, MAIL_SINK_FOLDER: 'mail' }));
+  expect(new Set(named)).toEqual(new Set(read));
 });

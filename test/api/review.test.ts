@@ -65,7 +65,7 @@ test('clearing – by an author – is refused, whatever their roles', async () 
 });
 
 test('clearing – a board over its limit – is refused; sending back mails the reason', async () => {
-  const { revisionId } = await newRevision(designer, tinyBoard(3));
+  const { revisionId } = await newRevision(designer, tinyBoard(1.1));
   await solve(designer, service, revisionId);
   expect((await change(designer, revisionId, 'submit', { reasons: [] })).status).toBe(200);
   expect(codes(await change(reviewer, revisionId, 'clear', { password }))).toEqual(['over-limit']);
@@ -110,11 +110,9 @@ test('issue – three signatures – freezes the revision, also against SQL, and
   await solve(designer, service, revisionId);
   await issue({ designer, reviewer, quality }, revisionId);
   const view = (await quality.get(`/api/v1/revisions/${revisionId}`)).body;
-  expect(view.signatures.map(({ meaning }: { meaning: string }) => meaning).sort()).toEqual([
-    'authored',
-    'released',
-    'reviewed',
-  ]);
+  expect(new Set(view.signatures.map(({ meaning }: { meaning: string }) => meaning))).toEqual(
+    new Set(['authored', 'reviewed', 'released']),
+  );
   expect(
     (
       await designer

@@ -58,7 +58,7 @@ export function measureBoard(board: Board): BoardMeasurement {
     x.fill(0);
     ({ iterations } = conjugateGradients(system, b, x, { tolerance: linearTolerance, maximumIterations, work }));
   };
-  let yardstick = { x, iterations: 0 };
+  let yardstick: ReturnType<typeof jacobiConjugateGradients> = { x, iterations: 0 };
   const linearMs = medianMs(linear);
   const yardstickMs = medianMs(() => (yardstick = jacobiConjugateGradients(network, diagonal, b, linearTolerance)));
   return {

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { withMigrations } from '#api/launch/database.js';
+import { migrateDatabase, rollBackDatabase } from '#api/launch/database.js';
 import { testDatabase } from '../support/database.ts';
 
 const database = testDatabase();
@@ -16,9 +16,9 @@ const tables = async () => {
 test('migrations – down and up again – leave nothing and bring everything back', async () => {
   const before = await tables();
   expect(before.length).toBeGreaterThan(10);
-  await withMigrations(database.url, (migrate) => migrate.rollback(undefined, true));
+  for (let left = true; left;) left = (await rollBackDatabase(database.url)).length > 0;
   expect(await tables()).toEqual([]);
-  await withMigrations(database.url, (migrate) => migrate.latest());
+  await migrateDatabase(database.url);
   expect(await tables()).toEqual(before);
 });
 

@@ -54,7 +54,7 @@ export function openService(database: TestDatabase) {
     anyone: () => supertest.agent(app),
     /** Does what is queued, in the thread that the worker uses. */
     runJobs: async () => {
-      const thread = new URL('../../api/solving/check-thread.ts', import.meta.url);
+      const thread = new URL('../../api/solving/check-thread.js', import.meta.url);
       const deps = {
         database: database.knex,
         logger,

@@ -81,7 +81,9 @@ function drawAxis(sheet: Sheet, axis: Axis) {
   sheet.y += headHeight - 6;
 }
 
-function drawLadder(sheet: Sheet, ladder: RecordLadder, { at, ticks }: Axis) {
+function drawLadder(sheet: Sheet, ladder: RecordLadder, axis: Axis) {
+  const { ticks } = axis;
+  const at = (valueC: number) => axis.at(valueC);
   const { pdf } = sheet;
   const top = sheet.y + 6;
   pdf.lineWidth(0.4).strokeColor(line);
