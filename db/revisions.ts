@@ -18,6 +18,8 @@ export type Revision = {
   sketchHash: string;
   /** Result that was signed; null before clearing. */
   resultId: string | null;
+  /** What the record says of people and papers, frozen at the issue; null before. */
+  issuedFacts: object | null;
   createdAt: Date;
   changedAt: Date;
   changedBy: string;
@@ -37,6 +39,7 @@ type Row = {
   sketch_version: number;
   sketch_hash: string;
   result_id: string | null;
+  issued_facts: object | null;
   created_at: Date;
   changed_at: Date;
   changed_by_name: string;
@@ -54,6 +57,7 @@ const revision = (row: Row): Revision => ({
   sketchVersion: row.sketch_version,
   sketchHash: row.sketch_hash,
   resultId: row.result_id,
+  issuedFacts: row.issued_facts,
   createdAt: row.created_at,
   changedAt: row.changed_at,
   changedBy: row.changed_by_name,
@@ -161,6 +165,7 @@ export type RevisionChange = {
   /** The sketch saved with this very change. */
   sketchHash?: string;
   resultId?: string;
+  issuedFacts?: object;
 };
 
 /**
@@ -184,6 +189,7 @@ export async function changeRevision(
       ...(change.stateReason === undefined ? {} : { state_reason: change.stateReason }),
       ...(change.sketchHash ? { sketch_hash: change.sketchHash, sketch_version: overVersion + 1 } : {}),
       ...(change.resultId ? { result_id: change.resultId } : {}),
+      ...(change.issuedFacts ? { issued_facts: JSON.stringify(change.issuedFacts) } : {}),
     })
     .returning<{ version: number; changed_at: Date }[]>(['version', 'changed_at']);
   const [row] = rows;

@@ -21,13 +21,14 @@ export async function changeState(
   actor: Pick<Actor, 'member' | 'team'>,
   revision: Revision,
   transition: Transition,
-  given: { reason?: string | null; resultId?: string; facts?: Record<string, unknown> } = {},
+  given: { reason?: string | null; resultId?: string; issuedFacts?: object; facts?: Record<string, unknown> } = {},
 ): Promise<void> {
   const { to } = transitions[transition];
   const changed = await changeRevision(trx, revision.id, revision.version, actor.member.id, {
     state: to,
     ...(given.reason === undefined ? {} : { stateReason: given.reason }),
     ...(given.resultId ? { resultId: given.resultId } : {}),
+    ...(given.issuedFacts ? { issuedFacts: given.issuedFacts } : {}),
   });
   if (!changed) throw new Error('a locked revision changed its version');
   await appendAuditEvent(trx, {

@@ -9,6 +9,7 @@ import type { Deps } from '../deps.ts';
 import { technicalRoles } from '#core/review/permissions.ts';
 import { issuedNotice } from '../mail/notices/issued-notice.ts';
 import type { Actor } from '../session/actor.ts';
+import { recordFacts } from '../record/record-facts.ts';
 import { resultThatCounts } from '../solving/result-that-counts.ts';
 import { actOnRevision } from './act-on-revision.ts';
 import { changeState } from './change-state.ts';
@@ -44,6 +45,7 @@ export async function issueRevision(
     });
     const superseded = siblings.filter(({ id, state }) => id !== revision.id && state === 'issued');
     await changeState(trx, actor, revision, 'issue', {
+      issuedFacts: await recordFacts(trx, revision),
       facts: { supersedes: superseded.map(({ letter }) => letter), verdict: stored?.result.verdict },
     });
     for (const earlier of superseded)

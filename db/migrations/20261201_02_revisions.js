@@ -46,6 +46,8 @@ export async function up(knex) {
       sketch_hash text not null,
       -- The result that was signed; later methods do not change what was cleared.
       result_id uuid references results,
+      -- Names and papers as they were at the issue, so that the record prints alike for ever.
+      issued_facts jsonb,
       created_at timestamptz not null default now(),
       created_by uuid not null references members,
       changed_at timestamptz not null default now(),
