@@ -1,3 +1,5 @@
+import { dot, norm, residualOf } from './vectors.ts';
+
 /** Why an iteration ended, and how well its answer fulfils the equations. */
 export type IterationRecord = {
   status: 'converged' | 'not-converged' | 'breakdown';
@@ -15,16 +17,18 @@ export type LinearSystem = {
  * Preconditioned conjugate gradients for a symmetric positive definite system, from the `x` that is given.
  * Steps as in Templates for the Solution of Linear Systems (Barrett et al. 1994), figure 2.5. The true residual is
  * computed at the end; when it lags behind the recursive one the iteration is restarted from the answer.
- * @param work six vectors of the length of b, so that a solve allocates nothing
+ * @param options.tolerance asked of ‖b − A·x‖ ÷ ‖b‖
+ * @param options.reduction where given, a residual reduced by this factor is enough
+ * @param options.work four vectors of the length of b, so that a solve allocates nothing
  */
 export function conjugateGradients(
   system: LinearSystem,
   b: Float64Array,
   x: Float64Array,
-  options: { tolerance: number; maximumIterations: number; work: ConjugateWork },
+  options: { tolerance: number; reduction?: number; maximumIterations: number; work: ConjugateWork },
 ): IterationRecord {
   const { r, z, p, q } = options.work;
-  const target = options.tolerance * norm(b);
+  let target = options.tolerance * norm(b);
   if (target === 0) {
     // Without heat the answer is known, and a residual relative to nothing could never be met.
     x.fill(0);
@@ -32,8 +36,8 @@ export function conjugateGradients(
   }
   let iterations = 0;
   for (let restart = 0; restart < 4; restart++) {
-    system.multiply(x, q);
-    for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
+    residualOf(system, b, x, r);
+    if (restart === 0) target = Math.max(target, (options.reduction ?? 0) * norm(r));
     if (norm(r) <= target) break;
     let rho = 0;
     for (let step = 0; iterations < options.maximumIterations; step++) {
@@ -47,8 +51,10 @@ export function conjugateGradients(
       rho = next;
       system.multiply(p, q);
       const curvature = dot(p, q);
-      if (!(curvature > 0) || !(rho > 0))
-        return { status: 'breakdown', iterations, residual: residualOf(system, b, x, options.work) };
+      if (!(curvature > 0) || !(rho > 0)) {
+        residualOf(system, b, x, r);
+        return { status: 'breakdown', iterations, residual: norm(r) / norm(b) };
+      }
       const alpha = rho / curvature;
       for (let n = 0; n < x.length; n++) {
         x[n]! += alpha * p[n]!;
@@ -59,9 +65,10 @@ export function conjugateGradients(
     }
     if (iterations >= options.maximumIterations) break;
   }
-  const residual = residualOf(system, b, x, options.work);
+  residualOf(system, b, x, r);
+  const size = norm(r);
   // The recursive residual may undercut the true one by rounding only.
-  return { status: residual <= options.tolerance * 1.5 ? 'converged' : 'not-converged', iterations, residual };
+  return { status: size <= target * 1.5 ? 'converged' : 'not-converged', iterations, residual: size / norm(b) };
 }
 
 export type ConjugateWork = { r: Float64Array; z: Float64Array; p: Float64Array; q: Float64Array };
@@ -70,17 +77,3 @@ export function conjugateWork(length: number): ConjugateWork {
   const vector = () => new Float64Array(length);
   return { r: vector(), z: vector(), p: vector(), q: vector() };
 }
-
-function residualOf(system: LinearSystem, b: Float64Array, x: Float64Array, { r, q }: ConjugateWork): number {
-  system.multiply(x, q);
-  for (let n = 0; n < b.length; n++) r[n] = b[n]! - q[n]!;
-  return norm(r) / norm(b);
-}
-
-function dot(a: Float64Array, b: Float64Array): number {
-  let s = 0;
-  for (let n = 0; n < a.length; n++) s += a[n]! * b[n]!;
-  return s;
-}
-
-const norm = (a: Float64Array) => Math.sqrt(dot(a, a));

@@ -1,7 +1,8 @@
 import { celsiusOffset } from '#core/units.ts';
 import type { BoardModel } from './board-model.ts';
 import type { HeatInput } from './solution.ts';
-import { caseConductance, type Rises } from './solve-rises.ts';
+import { caseConductance } from './case-film.ts';
+import type { Rises } from './solve-rises.ts';
 
 /** Heat in against heat out by path, W, from the finished temperatures alone; compensated sums (Kahan). */
 export function energyBalance(model: BoardModel, heat: HeatInput, solved: Rises) {
@@ -15,8 +16,12 @@ export function energyBalance(model: BoardModel, heat: HeatInput, solved: Rises)
     out.add(solved.films.bottom[cell]! * solved.rise[cell * layers + layers - 1]!);
   }
   model.packages.forEach((nodes, index) =>
-    out.add(caseConductance(model, solved.films, index) * solved.rise[nodes.junction]!),
+    out.add(caseConductance(nodes, solved.films.cases[index]!) * solved.rise[nodes.junction]!),
   );
+  for (const { face, packages, back } of solved.films.air ? [solved.films.air.top, solved.films.air.bottom] : []) {
+    for (const heatBack of back) out.add(-heatBack);
+    packages.forEach((index, k) => out.add(-face.bodies[k]!.back * solved.films.air!.caseAir[index]!));
+  }
   for (const sink of model.sinks) {
     const sinkRise = sink.toC === 'ambient' ? 0 : sink.toC + celsiusOffset - solved.ambientK;
     sink.weights.cell.forEach((cell, k) =>

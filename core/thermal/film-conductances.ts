@@ -2,10 +2,13 @@ import type { Condition } from '#core/board/condition.ts';
 import { boundsOf, perimeter, polygonArea } from '#core/geometry/polygon.ts';
 import { celsiusOffset } from '#core/units.ts';
 import { pressureRatio } from './air-properties.ts';
+import { airReturn, type AirReturn } from './air-return.ts';
+import { AirStreaks } from './air-streaks.ts';
 import type { BoardModel } from './board-model.ts';
-import type { Face } from './film-areas.ts';
+import { caseFilm } from './case-film.ts';
+import { drivingRise } from './driving-rise.ts';
 import { flowDistances } from './flow-distance.ts';
-import { blendedFilm, forcedFilm } from './forced-convection.ts';
+import { blendedFilm, boardEnhancement, forcedFilm } from './forced-convection.ts';
 import { naturalFilm, type Attitude } from './natural-convection.ts';
 import { radiationFilm } from './radiation.ts';
 
@@ -20,94 +23,87 @@ export type Films = {
   update: (rise: Float64Array, caseRise: Float64Array, out: FilmConductances) => void;
 };
 
-export type FilmConductances = { top: Float64Array; bottom: Float64Array; cases: Float64Array };
+/** Convection and radiation of every outer cell face and case top, W/K; `air` is null where the air stands still. */
+export type FilmConductances = {
+  top: Float64Array;
+  bottom: Float64Array;
+  cases: Float64Array;
+  air: AirReturn | null;
+};
 
-export function filmConductances(model: BoardModel): FilmConductances {
+/** Radiation is linearised between these rises, so that a wild intermediate field cannot overflow. */
+const withinRange = (rise: number) => Math.max(-150, Math.min(2000, rise));
+
+/** Whether the air moves in a condition: a stopped fan is still air. */
+export function movingAir(condition: Condition) {
+  return condition.air.kind === 'moving' && condition.fault?.kind !== 'fan-stopped' ? condition.air : null;
+}
+
+/** Length that natural convection is built on, m: the height when upright, area ÷ perimeter when lying. */
+export function naturalLength(model: BoardModel, condition: Condition): number {
+  const { points } = model.board.outline;
+  const bounds = boundsOf(points);
+  const mm = condition.orientation === 'vertical' ? bounds.maxY - bounds.minY : polygonArea(points) / perimeter(points);
+  return mm * 1e-3;
+}
+
+export function buildFilms(model: BoardModel, condition: Condition): { films: Films; out: FilmConductances } {
+  const ambientK = condition.ambientC + condition.boxRiseK + celsiusOffset;
+  const pressure = pressureRatio(condition.altitudeM);
+  const fixed = condition.filmWPerM2K;
+  const moving = fixed === null ? movingAir(condition) : null;
+  const upright = condition.orientation === 'vertical';
+  const length = naturalLength(model, condition);
   const cells = model.grid.columns * model.grid.rows;
-  return {
+  const out: FilmConductances = {
     top: new Float64Array(cells),
     bottom: new Float64Array(cells),
     cases: new Float64Array(model.packages.length),
+    air: moving ? airReturn(model, new AirStreaks(model.grid, moving.towardDeg)) : null,
   };
-}
-
-export function buildFilms(model: BoardModel, condition: Condition): Films {
-  const ambientK = condition.ambientC + condition.boxRiseK + celsiusOffset;
-  const pressure = pressureRatio(condition.altitudeM);
-  const moving = condition.air.kind === 'moving' && condition.fault?.kind !== 'fan-stopped' ? condition.air : null;
   const distances = moving ? flowDistances(model.grid, moving.towardDeg) : null;
-  const { points } = model.board.outline;
-  const bounds = boundsOf(points);
-  const upright = condition.orientation === 'vertical';
-  const length = (upright ? bounds.maxY - bounds.minY : polygonArea(points) / perimeter(points)) * 1e-3;
-  const layers = model.layers.count;
-
   const sides = [
     { face: model.top, offset: 0, attitude: upright ? 'upright' : 'face-up', key: 'top' },
-    { face: model.bottom, offset: layers - 1, attitude: upright ? 'upright' : 'face-down', key: 'bottom' },
+    { face: model.bottom, offset: model.layers.count - 1, attitude: upright ? 'upright' : 'face-down', key: 'bottom' },
   ] as const;
 
-  const update: Films['update'] = (rise, caseRise, out) => {
-    const fixed = condition.filmWPerM2K;
-    if (fixed !== null) {
-      const films = typeof fixed === 'number' ? { top: fixed, bottom: fixed } : fixed;
-      for (const { face, key } of sides) face.area.forEach((area, cell) => (out[key][cell] = films[key] * area));
-      model.packages.forEach((nodes, index) => (out.cases[index] = films[nodes.side] * nodes.caseAreaM2));
-      return;
-    }
+  const useFixed = (films: { top: number; bottom: number }) => {
+    for (const { face, key } of sides) face.area.forEach((area, cell) => (out[key][cell] = films[key] * area));
+    model.packages.forEach((nodes, index) => (out.cases[index] = films[nodes.side] * nodes.caseAreaM2));
+  };
+  const update: Films['update'] = (rise, caseRise) => {
+    if (fixed !== null) return useFixed(typeof fixed === 'number' ? { top: fixed, bottom: fixed } : fixed);
     for (const { face, offset, attitude, key } of sides) {
-      const mean = drivingRise(face, rise, offset, layers);
-      const natural = naturalFilm(attitude as Attitude, ambientK, mean.rise, length * mean.shrink, pressure);
-      const film = ambientK + mean.rise / 2;
-      for (let cell = 0; cell < face.area.length; cell++) {
+      const driving = drivingRise(face, rise, offset, model.layers.count);
+      const natural = naturalFilm(attitude as Attitude, ambientK, driving.rise, length * driving.shrink, pressure);
+      const filmK = ambientK + driving.rise / 2;
+      const streaks = out.air?.[key];
+      for (let cell = 0; cell < cells; cell++) {
+        let convection = natural;
+        if (moving && distances && streaks) {
+          const { near, far } = distances;
+          const forced = boardEnhancement * forcedFilm(moving.speedMPerS, near[cell]!, far[cell]!, filmK, pressure);
+          convection = blendedFilm(natural, forced);
+          streaks.face.film[cell] = convection;
+          streaks.face.forced[cell] = (forced / convection) ** 3;
+        }
         const area = face.area[cell]!;
         if (area === 0) {
           out[key][cell] = 0;
           continue;
         }
-        const convection =
-          moving && distances
-            ? blendedFilm(
-                natural,
-                forcedFilm(moving.speedMPerS, distances.near[cell]!, distances.far[cell]!, film, pressure),
-              )
-            : natural;
-        const surfaceK = ambientK + Math.max(-150, Math.min(2000, rise[cell * layers + offset]!));
+        const surfaceK = ambientK + withinRange(rise[cell * model.layers.count + offset]!);
         out[key][cell] = area * (convection + radiationFilm(face.emissivity[cell]!, surfaceK, ambientK));
       }
       model.packages.forEach((nodes, index) => {
         if (nodes.side !== key) return;
-        const surfaceK = ambientK + Math.max(-150, Math.min(2000, caseRise[index]!));
-        let convection = natural;
-        const cell = nodes.lands[0]?.weights.cell[0];
-        if (moving && distances && cell !== undefined) {
-          convection = blendedFilm(
-            natural,
-            forcedFilm(moving.speedMPerS, distances.near[cell]!, distances.far[cell]!, film, pressure),
-          );
-        }
-        out.cases[index] = nodes.caseAreaM2 * (convection + radiationFilm(nodes.emissivity, surfaceK, ambientK));
+        const surfaceK = ambientK + withinRange(caseRise[index]!);
+        const convection = nodes.caseAreaM2 * caseFilm(nodes, natural, moving?.speedMPerS ?? 0, filmK, pressure);
+        out.cases[index] = convection + nodes.caseAreaM2 * radiationFilm(nodes.emissivity, surfaceK, ambientK);
+        if (out.air) out.air.caseConvection[index] = convection;
       });
     }
+    out.air?.update(out);
   };
-  return { ambientK, update };
-}
-
-/**
- * Rise that drives natural convection on an unevenly warm face: ∫ΔT² dA ÷ ∫ΔT dA; the length shrinks with the side of the
- * warm patch, whose area is (∫ΔT dA)² ÷ ∫ΔT² dA.
- */
-function drivingRise(face: Face, rise: Float64Array, offset: number, layers: number) {
-  let area = 0;
-  let first = 0;
-  let second = 0;
-  for (let cell = 0; cell < face.area.length; cell++) {
-    const a = face.area[cell]!;
-    const t = Math.abs(rise[cell * layers + offset]!);
-    area += a;
-    first += a * t;
-    second += a * t * t;
-  }
-  if (first < 1e-12 || area === 0) return { rise: 0.01, shrink: 1 };
-  return { rise: Math.max(0.01, second / first), shrink: Math.sqrt((first * first) / second / area) };
+  return { films: { ambientK, update }, out };
 }

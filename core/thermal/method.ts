@@ -1,13 +1,19 @@
 import type { Condition } from '#core/board/condition.ts';
 
-/** Method version: any change in the numbers is a new one, with a line here; stored results keep theirs. */
-export const methodVersion = '1.0.0';
+/**
+ * Method version: any change in the numbers is a new one, with a line here; stored results keep theirs.
+ * 1.0.0 layered cells, package star, films by correlation, multigrid.
+ * 1.1.0 moving air: enhanced films, bodies in the stream, air warmed upstream in every rise and in the ladder.
+ */
+export const methodVersion = '1.1.0';
 
 /** Linear solution: ‖b − A·x‖ ÷ ‖b‖ asked of the final solve, and passed only with an energy balance below the limit. */
 export const linearTolerance = 1e-9;
 export const energyLimit = 1e-6;
 /** The films are settled when no junction or cell moves more than this between two rounds, K. */
 export const filmToleranceK = 0.003;
+/** Rounds before the last reduce their residual by this factor. */
+export const roundReduction = 0.03;
 export const maximumFilmRounds = 60;
 export const maximumIterations = 400;
 

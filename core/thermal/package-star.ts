@@ -16,6 +16,9 @@ export type PackageNodes = {
   caseTopKPerW: number;
   /** Body surface that sees the air, m². */
   caseAreaM2: number;
+  /** Side of the square of the body's area, m, and the board under it. */
+  bodySideM: number;
+  body: CellWeights;
   emissivity: number;
 };
 
@@ -71,6 +74,8 @@ export function packageStar(
     side: regulator.side,
     caseTopKPerW: model.caseTopKPerW,
     caseAreaM2: (length * width + 2 * (length + width) * height) * 1e-6,
+    bodySideM: Math.sqrt(length * width) * 1e-3,
+    body: cellWeights(map, [placedRectangle(regulator, [0, 0], [length, width])]),
     emissivity: model.emissivity,
   };
   return { nodes, pairs, used };

@@ -1,6 +1,6 @@
 import type { Condition } from '#core/board/condition.ts';
 import { celsiusOffset } from '#core/units.ts';
-import { adjointLedger } from './adjoint-ledger.ts';
+import { adjointLedger, type Influence, type LedgerEntry } from './adjoint-ledger.ts';
 import { buildBoardModel, type BoardModel } from './board-model.ts';
 import { energyBalance } from './energy-balance.ts';
 import { gridError } from './grid-error.ts';
@@ -23,30 +23,33 @@ export function solveCondition(
   heat: HeatInput,
   options: { start?: ThermalSolution | undefined; gridError?: boolean | undefined } = {},
 ): ThermalSolution {
-  const solved = solveRises(model, condition, heat, options.start && startOf.get(options.start));
+  const earlier = options.start && startOf.get(options.start);
+  const solved = solveRises(model, condition, heat, earlier?.solved);
   const energy = energyBalance(model, heat, solved);
   const status =
     solved.status === 'converged' && !(energy.imbalance <= energyLimit) ? ('not-converged' as const) : solved.status;
-  const ledger = status === 'converged' ? adjointLedger(model, heat) : [];
+  const { ledger, influences } =
+    status === 'converged'
+      ? adjointLedger(model, heat, solved, earlier?.influences)
+      : { ledger: [] as LedgerEntry[], influences: [] };
   const coarser = options.gridError && status === 'converged' ? coarserJunctions(model, condition, heat) : [];
   const share = modelErrorShareOf(condition);
   const regulators = new Map<string, RegulatorHeat>();
   model.packages.forEach((nodes, index) => {
     const junctionK = solved.rise[nodes.junction]!;
     const landK = hottestLand(model, solved, index);
-    const own = ledger.find((entry) => entry.victim === nodes.ref && entry.source === nodes.ref)?.riseK ?? 0;
-    const neighboursK = ledger
-      .filter((entry) => entry.victim === nodes.ref && entry.source !== nodes.ref)
-      .reduce((sum, entry) => sum + entry.riseK, 0);
+    const others = ledger.filter((entry) => entry.victim === nodes.ref && entry.source !== nodes.ref);
+    const preheatedAirK = others.reduce((sum, entry) => sum + entry.byAirK, 0);
+    const neighboursK = others.reduce((sum, entry) => sum + entry.riseK - entry.byAirK, 0);
     const packageK = junctionK - landK;
     regulators.set(nodes.ref, {
       junctionC: junctionK + solved.ambientK - celsiusOffset,
       caseTopC: solved.caseRise[index]! + solved.ambientK - celsiusOffset,
       landC: landK + solved.ambientK - celsiusOffset,
       boxK: condition.boxRiseK,
-      preheatedAirK: junctionK - own - neighboursK,
+      preheatedAirK,
       neighboursK,
-      boardK: own - packageK,
+      boardK: junctionK - preheatedAirK - neighboursK - packageK,
       packageK,
       gridErrorK: coarser.length
         ? gridError([junctionK, ...coarser.map((rises) => rises.get(nodes.ref) ?? NaN)])
@@ -63,7 +66,7 @@ export function solveCondition(
     regulators,
     sources: sourceTemperatures(model, solved),
     probes: new Map(model.board.probes.map((probe) => [probe.id, probeTemperature(model, solved, probe)])),
-    ledger,
+    ledger: ledger.map(({ victim, source, riseK }) => ({ victim, source, riseK })),
     ...boardTemperatures(model, solved),
     energy,
     solver: {
@@ -75,12 +78,16 @@ export function solveCondition(
     },
     notices: noticesOf(model, condition, solved),
   };
-  startOf.set(solution, solved);
+  const keep = solved.rise.length * influences.length <= mostKeptInfluences;
+  startOf.set(solution, { solved, influences: keep ? influences : [] });
   return solution;
 }
 
-/** Node rises behind a solution, for warm starts, without making them part of the result. */
-const startOf = new WeakMap<ThermalSolution, Rises>();
+/** Influences kept for a warm start, numbers in all: 64 MB. */
+const mostKeptInfluences = 8e6;
+
+/** Fields behind a solution, for warm starts, without making them part of the result. */
+const startOf = new WeakMap<ThermalSolution, { solved: Rises; influences: Influence[] }>();
 
 const worst = (values: (number | null)[]) =>
   values.every((value) => value === null) ? null : Math.max(...values.map((value) => value ?? 0));

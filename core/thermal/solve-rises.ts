@@ -1,11 +1,18 @@
 import type { Condition } from '#core/board/condition.ts';
-import { conjugateGradients, conjugateWork } from '#core/numerics/conjugate-gradients.ts';
+import { bicgstab } from '#core/numerics/bicgstab.ts';
+import {
+  conjugateGradients,
+  conjugateWork,
+  type ConjugateWork,
+  type IterationRecord,
+} from '#core/numerics/conjugate-gradients.ts';
 import { multiply } from '#core/numerics/layered-network.ts';
-import { applyMultigrid, refreshMultigrid } from '#core/numerics/multigrid.ts';
+import { applyMultigrid, refreshMultigrid, type Multigrid } from '#core/numerics/multigrid.ts';
 import { celsiusOffset } from '#core/units.ts';
 import type { BoardModel } from './board-model.ts';
-import { buildFilms, filmConductances, type FilmConductances } from './film-conductances.ts';
-import { filmToleranceK, linearTolerance, maximumFilmRounds, maximumIterations } from './method.ts';
+import { caseConductance } from './case-film.ts';
+import { buildFilms, type FilmConductances } from './film-conductances.ts';
+import { filmToleranceK, linearTolerance, maximumFilmRounds, maximumIterations, roundReduction } from './method.ts';
 import type { HeatInput } from './solution.ts';
 
 /** Rises over the local air of every node and case top, with the films that belong to them. */
@@ -22,17 +29,15 @@ export type Rises = {
 
 /**
  * Non-linear solution by Picard rounds: films from the present rises, one linear solve, again until nothing moves.
- * The early rounds are solved loosely, the last one with the films frozen to the full tolerance.
+ * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move.
  */
 export function solveRises(model: BoardModel, condition: Condition, heat: HeatInput, start?: Rises): Rises {
   const { network, multigrid } = model;
-  const films = buildFilms(model, condition);
-  const out = filmConductances(model);
+  const { films, out } = buildFilms(model, condition);
   const n = network.anchor.length;
   const usable = start && start.rise.length === n;
   const rise = usable ? start.rise.slice() : new Float64Array(n);
   const caseRise = usable ? start.caseRise.slice() : new Float64Array(model.packages.length);
-  const work = conjugateWork(n);
   const b = rightSide(model, heat, films.ambientK);
   const before = new Float64Array(n);
   if (!usable) rise.fill(20);
@@ -48,42 +53,68 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     residual,
   });
 
-  const fixed = condition.filmWPerM2K !== null;
   let iterations = 0;
+  let last = condition.filmWPerM2K !== null;
   for (let round = 0; round < maximumFilmRounds; round++) {
     films.update(rise, caseRise, out);
     setAnchors(model, out);
     if (!refreshMultigrid(multigrid)) return record('invalid', 'The network has no path to the air.', iterations, NaN);
-    const { diagonal } = multigrid.levels[0]!;
-    const system = {
-      multiply: (x: Float64Array, y: Float64Array) => multiply(network, diagonal, x, y),
-      precondition: (r: Float64Array, z: Float64Array) => applyMultigrid(multigrid, r, z),
-    };
     before.set(rise);
-    const solve = (tolerance: number) => conjugateGradients(system, b, rise, { tolerance, maximumIterations, work });
-    let linear = solve(fixed ? linearTolerance : 1e-4);
+    const linear = solveLinear(model, out, b, rise, { reduction: last ? 0 : roundReduction });
     iterations += linear.iterations;
     if (linear.status === 'breakdown')
       return record('invalid', 'The linear solution broke down.', iterations, linear.residual);
-    model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
     let moved = 0;
     for (let k = 0; k < n; k++) moved = Math.max(moved, Math.abs(rise[k]! - before[k]!));
     if (!Number.isFinite(moved))
       return record('invalid', 'The temperatures are not finite.', iterations, linear.residual);
-    if (!fixed && moved > filmToleranceK * 10) continue;
-    if (!fixed) {
-      linear = solve(linearTolerance);
-      iterations += linear.iterations;
-      moved = 0;
-      for (let k = 0; k < n; k++) moved = Math.max(moved, Math.abs(rise[k]! - before[k]!));
-      model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
-      if (moved > filmToleranceK) continue;
+    out.air?.subtract(rise, before);
+    model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
+    if (!last) {
+      last = moved <= filmToleranceK;
+      continue;
     }
-    return linear.status === 'converged'
-      ? record('converged', null, iterations, linear.residual)
-      : record('not-converged', 'The linear solution did not reach its tolerance.', iterations, linear.residual);
+    if (linear.status !== 'converged')
+      return record('not-converged', 'The linear solution did not reach its tolerance.', iterations, linear.residual);
+    if (moved <= 3 * filmToleranceK || condition.filmWPerM2K !== null)
+      return record('converged', null, iterations, linear.residual);
+    last = false;
   }
   return record('not-converged', `The films did not settle in ${maximumFilmRounds} rounds.`, iterations, NaN);
+}
+
+/**
+ * Rises for given heat with the films as they are, or, `transposed`, the weights of heat for given weights of rises: by
+ * conjugate gradients where the network is symmetric, by stabilised bi-conjugate gradients where air carries heat along.
+ */
+export function solveLinear(
+  { network, multigrid }: BoardModel,
+  { air }: FilmConductances,
+  b: Float64Array,
+  x: Float64Array,
+  options: { tolerance?: number; reduction?: number; transposed?: boolean },
+): IterationRecord {
+  const { diagonal } = multigrid.levels[0]!;
+  const limits = { tolerance: linearTolerance, maximumIterations, ...options };
+  const precondition = (r: Float64Array, z: Float64Array) => applyMultigrid(multigrid, r, z);
+  if (!air) {
+    const plain = (v: Float64Array, y: Float64Array) => multiply(network, diagonal, v, y);
+    return conjugateGradients({ multiply: plain, precondition }, b, x, { ...limits, work: workOf(multigrid) });
+  }
+  const carrying = (v: Float64Array, y: Float64Array) => {
+    multiply(network, diagonal, v, y);
+    if (options.transposed) air.subtractTransposed(v, y);
+    else air.subtract(v, y);
+  };
+  return bicgstab({ multiply: carrying, precondition }, b, x, limits);
+}
+
+const works = new WeakMap<Multigrid, ConjugateWork>();
+
+function workOf(multigrid: Multigrid): ConjugateWork {
+  const work = works.get(multigrid) ?? conjugateWork(multigrid.levels[0]!.diagonal.length);
+  works.set(multigrid, work);
+  return work;
 }
 
 /** Heat at each node, W, with the heat that sinks at a fixed temperature bring. */
@@ -107,15 +138,12 @@ export function rightSide(model: BoardModel, heat: HeatInput, ambientK: number):
   return b;
 }
 
-/** Case top between its resistance and its film. */
-export function caseConductance(model: BoardModel, films: FilmConductances, index: number): number {
-  const film = films.cases[index]!;
-  return film === 0 ? 0 : 1 / (model.packages[index]!.caseTopKPerW + 1 / film);
-}
-
 function caseRiseOf(model: BoardModel, films: FilmConductances, rise: Float64Array, index: number): number {
   const nodes = model.packages[index]!;
-  return rise[nodes.junction]! * (1 - nodes.caseTopKPerW * caseConductance(model, films, index));
+  const film = films.cases[index]!;
+  const fromAir = nodes.caseTopKPerW * caseConductance(nodes, film);
+  const air = films.air && film > 0 ? (films.air.caseAir[index]! * films.air.caseConvection[index]!) / film : 0;
+  return rise[nodes.junction]! * (1 - fromAir) + air * fromAir;
 }
 
 function setAnchors(model: BoardModel, films: FilmConductances) {
@@ -131,5 +159,5 @@ function setAnchors(model: BoardModel, films: FilmConductances) {
       (cell, k) => (anchor[cell * layers + sink.layer]! += sink.conductanceWPerK * sink.weights.weight[k]!),
     );
   }
-  model.packages.forEach((nodes, index) => (anchor[nodes.junction]! += caseConductance(model, films, index)));
+  model.packages.forEach((nodes, index) => (anchor[nodes.junction]! += caseConductance(nodes, films.cases[index]!)));
 }
