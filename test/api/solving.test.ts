@@ -1,4 +1,8 @@
+import { execFileSync } from 'node:child_process';
+import { join } from 'node:path';
 import { beforeAll, expect, test } from 'vitest';
+import { readBoard } from '#core/board/read-board.ts';
+import { checkBoard } from '#core/check/check-board.ts';
 import { testDatabase } from '../support/database.ts';
 import { newRevision, solve } from '../support/revision-steps.ts';
 import { addTeam, type Agent, openService, type Service } from '../support/service.ts';
@@ -51,4 +55,22 @@ test('check – cancelled while it waits – is never done', async () => {
   await service.runJobs();
   expect((await designer.get(`/api/v1/revisions/${revisionId}/jobs/${job.body.id}`)).body.state).toBe('cancelled');
   expect((await designer.get(`/api/v1/revisions/${revisionId}/result`)).body).toBeNull();
+});
+
+test('one board – by the core, the server’s thread and the command line – has one result to the last digit', async () => {
+  const document = tinyBoard(0.25);
+  const { revisionId } = await newRevision(designer, document);
+  await solve(designer, service, revisionId);
+  const stored = (await designer.get(`/api/v1/revisions/${revisionId}/result`)).body.result;
+  const reading = readBoard(document);
+  if (!reading.ok) throw new Error('the test board is not valid');
+  const own = JSON.parse(JSON.stringify(checkBoard(reading.board, reading.assumptions).result));
+  const command = join(import.meta.dirname, '../../api/command/dropwatt.js');
+  const printed = JSON.parse(
+    execFileSync(process.execPath, [command, 'check', '-'], { input: JSON.stringify(document), encoding: 'utf8' }),
+  );
+  // Only the time that it took may differ.
+  for (const result of [stored, own, printed]) for (const { solver } of result.conditions) solver.milliseconds = 0;
+  expect(stored).toEqual(own);
+  expect(printed).toEqual(own);
 });
