@@ -7,6 +7,7 @@ import { openDatabase } from '#db/connection.ts';
 import { createApp } from './app.ts';
 import { environmentOrExit } from './env.ts';
 import { mailFolder } from './mail/mail-folder.ts';
+import { orEnd } from './or-end.ts';
 import { passwordHasher } from './session/password-hasher.ts';
 import { openCheckQueue } from './solving/check-queue.ts';
 import { whenAsked } from './when-asked.ts';
@@ -15,7 +16,10 @@ import { whenAsked } from './when-asked.ts';
 const environment = environmentOrExit(process.env);
 const logger = pino({ level: environment.LOG_LEVEL });
 const database = openDatabase(environment.DATABASE_URL);
-const queue = await openCheckQueue(environment.DATABASE_URL, logger, false);
+const queue = await orEnd(
+  'DATABASE_URL leads to no usable database',
+  openCheckQueue(environment.DATABASE_URL, logger, false),
+);
 const webFolder = resolve('dist/web');
 const app = createApp({
   database,

@@ -12,6 +12,7 @@ import { transaction } from '#db/transaction.ts';
 import { beat, removeDeadHeartbeats, removeHeartbeat } from '#db/worker-heartbeats.ts';
 import { environmentOrExit } from './env.ts';
 import { sendWaitingMails } from './mail/send-waiting-mails.ts';
+import { orEnd } from './or-end.ts';
 import { repeat } from './repeat.ts';
 import { openCheckQueue } from './solving/check-queue.ts';
 import { performJob } from './solving/perform-job.ts';
@@ -21,7 +22,10 @@ import { whenAsked } from './when-asked.ts';
 const environment = environmentOrExit(process.env);
 const logger = pino({ level: environment.LOG_LEVEL });
 const database = openDatabase(environment.DATABASE_URL, 6);
-const queue = await openCheckQueue(environment.DATABASE_URL, logger, true);
+const queue = await orEnd(
+  'DATABASE_URL leads to no usable database',
+  openCheckQueue(environment.DATABASE_URL, logger, true),
+);
 const transport = nodemailer.createTransport({
   url: environment.SMTP_URL,
   connectionTimeout: 10_000,

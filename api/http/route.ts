@@ -14,7 +14,9 @@ export type RouteInput<N extends EndpointName> = {
   deps: Deps;
   /** The pool; an open transaction for an endpoint that takes an Idempotency-Key. */
   database: Database;
-  actor: Definition<N>['access'] extends 'public' ? Actor | null : Actor;
+  actor: Definition<N>['access'] extends 'public' ? undefined : Actor;
+  /** Who sent a request that anybody may send; the database is asked only when the route wants to know. */
+  whoAsks: () => Promise<Actor | null>;
   params: Parsed<Definition<N>, 'params'>;
   query: Parsed<Definition<N>, 'query'>;
   body: Parsed<Definition<N>, 'body'>;

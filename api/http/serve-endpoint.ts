@@ -21,8 +21,9 @@ import { sendAnswer } from './send-answer.ts';
  */
 export function serveEndpoint(deps: Deps, name: string, endpoint: Endpoint, route: AnyRoute): RequestHandler {
   return async (request, response) => {
-    const actor = await readActor(deps, request);
-    if (endpoint.access !== 'public' && !actor) throw signedOut();
+    const whoAsks = () => readActor(deps, request);
+    const actor = endpoint.access === 'public' ? undefined : await whoAsks();
+    if (actor === null) throw signedOut();
     const params = readParams(endpoint.params, request.params);
     const revision = actor ? await loadSubject(deps, actor, params) : null;
     if (actor) authorise(endpoint.access, actor);
@@ -31,6 +32,7 @@ export function serveEndpoint(deps: Deps, name: string, endpoint: Endpoint, rout
     const input = {
       deps,
       actor,
+      whoAsks,
       params,
       query,
       body,

@@ -9,14 +9,18 @@ import { completeReset, requestReset } from './reset-password.ts';
 import { signIn } from './sign-in.ts';
 
 export const sessionRoutes: Routes<keyof typeof sessionEndpoints> = {
-  readSession: async ({ actor }) => ({ body: actor && presentSession(actor) }),
+  readSession: async ({ whoAsks }) => {
+    const actor = await whoAsks();
+    return { body: actor && presentSession(actor) };
+  },
 
   signIn: async ({ deps, body, address }) => {
     const { token, actor } = await signIn(deps, { ...body, address });
     return { body: presentSession(actor), session: { token, expiresAt: actor.expiresAt } };
   },
 
-  signOut: async ({ database, actor }) => {
+  signOut: async ({ database, whoAsks }) => {
+    const actor = await whoAsks();
     if (actor)
       await transaction(database, async (trx) => {
         await endSession(trx, actor.id);

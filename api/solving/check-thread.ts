@@ -2,7 +2,7 @@ import { parentPort, workerData } from 'node:worker_threads';
 import type { BoardDocument } from '#core/board/document.ts';
 import { readBoard } from '#core/board/read-board.ts';
 import { checkBoard } from '#core/check/check-board.ts';
-import type { CheckResult } from '#core/result/result.ts';
+import { type CheckResult, checkResult } from '#core/result/result.ts';
 import { packHeatField } from './heat-field-pack.ts';
 
 /** What the thread tells: progress after every condition, then the result or why there is none. */
@@ -28,6 +28,12 @@ function run(document: BoardDocument): void {
         return true;
       },
     });
+    // JSON has no NaN: one would be stored as null, silently. The schema takes finite numbers only.
+    const checked = checkResult.safeParse(result);
+    if (!checked.success) {
+      const [issue] = checked.error.issues;
+      return tell({ kind: 'refused', message: `The check gave no number at ${issue?.path.join('.')}.` });
+    }
     const packed = new Map([...fields].map(([condition, field]) => [condition, packHeatField(field)]));
     tell({ kind: 'result', result, fields: packed });
   } catch (error) {

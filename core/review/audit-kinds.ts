@@ -26,7 +26,6 @@ export const auditKinds = [
   'revision.issued',
   'revision.superseded',
   'revision.withdrawn',
-  'library.item-stored',
   'mail.given-up',
 ] as const;
 
