@@ -1,4 +1,5 @@
 import type { ErrorRequestHandler, Response } from 'express';
+import type { Logger } from 'pino';
 import type { Problem } from '#core/contract/problem.ts';
 import { sqlState } from '#db/transaction.ts';
 import { invalid, Refusal, unavailable } from './refusal.ts';
@@ -7,10 +8,21 @@ import { invalid, Refusal, unavailable } from './refusal.ts';
 export const answerProblems: ErrorRequestHandler = (error: unknown, request, response, next) => {
   if (response.headersSent) return next(error);
   const refusal = refusalOf(error);
-  if (refusal.problem.status >= 500) request.log.error({ err: error }, 'request failed');
+  if (refusal.problem.status === 503) sayUnavailable(request.log, error);
+  else if (refusal.problem.status >= 500) request.log.error({ err: error }, 'request failed');
   if (refusal.retryAfterSeconds !== null) response.set('Retry-After', String(refusal.retryAfterSeconds));
   sendProblem(response, { ...refusal.problem, instance: typeof request.id === 'string' ? request.id : '' });
 };
+
+const quietMs = 1000;
+let lastSaid = 0;
+
+/** Hundreds of requests meet the same outage in a second; one line of it is enough. */
+function sayUnavailable(logger: Logger, error: unknown): void {
+  if (Date.now() - lastSaid < quietMs) return;
+  lastSaid = Date.now();
+  logger.warn({ err: error }, 'a part of the service does not answer');
+}
 
 export function sendProblem(response: Response, problem: Problem): void {
   response.status(problem.status).set('Content-Type', 'application/problem+json; charset=utf-8');

@@ -14,6 +14,8 @@ export function logRequests(logger: Logger): RequestHandler {
       return id;
     },
     customLogLevel: (_request, response, error) => {
+      // A part that is away is told once a second by whoever answers for it, not once per request.
+      if (response.statusCode === 503) return 'debug';
       if (error || response.statusCode >= 500) return 'error';
       return response.statusCode >= 400 ? 'info' : 'debug';
     },

@@ -4,7 +4,7 @@ import { authorsOf } from '#db/authors.ts';
 import { countOpenComments } from '#db/comments.ts';
 import type { Database } from '#db/database.ts';
 import { listReasons } from '#db/finding-reasons.ts';
-import { findRevision } from '#db/revisions.ts';
+import { findRevision, type Revision } from '#db/revisions.ts';
 import { listSignatures } from '#db/signatures.ts';
 import { notFound } from '../http/refusal.ts';
 import type { Actor } from '../session/actor.ts';
@@ -17,9 +17,23 @@ export async function presentRevision(
 ): Promise<RevisionView> {
   const revision = await findRevision(database, actor.team.id, id);
   if (!revision) throw notFound('This revision');
-  const authors = await authorsOf(database, id);
+  return presentLoaded(database, actor, revision);
+}
+
+/** The same of a revision that was just read. */
+export async function presentLoaded(
+  database: Database,
+  actor: Pick<Actor, 'member'>,
+  revision: Revision,
+): Promise<RevisionView> {
+  const { id } = revision;
+  const [authors, signatures, reasons, openComments] = await Promise.all([
+    authorsOf(database, id),
+    listSignatures(database, id, revision.sketchVersion),
+    listReasons(database, id),
+    countOpenComments(database, id),
+  ]);
   const isAuthor = authors.some((author) => author.id === actor.member.id);
-  const signatures = await listSignatures(database, id, revision.sketchVersion);
   return {
     id,
     assembly: revision.assembly,
@@ -30,10 +44,10 @@ export async function presentRevision(
     createdAt: revision.createdAt.toISOString(),
     changedAt: revision.changedAt.toISOString(),
     changedBy: revision.changedBy,
-    reasons: await listReasons(database, id),
+    reasons,
     stateReason: revision.stateReason,
     signatures: signatures.map(({ name, meaning, signedAt }) => ({ name, meaning, signedAt: signedAt.toISOString() })),
-    openComments: await countOpenComments(database, id),
+    openComments,
     allowed: allowedRevisionActions(actor.member.roles, revision.state, isAuthor),
   };
 }

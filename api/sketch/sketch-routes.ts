@@ -2,13 +2,13 @@ import type { sketchEndpoints } from '#core/contract/sketch-endpoints.ts';
 import { findSketchVersion, listSketchVersions, type SketchVersion } from '#db/sketch-versions.ts';
 import { notFound } from '../http/refusal.ts';
 import type { Routes } from '../http/route.ts';
-import { presentRevision } from '../review/present-revision.ts';
+import { presentLoaded } from '../review/present-revision.ts';
 import { readWrittenBoard } from './read-written-board.ts';
 import { saveSketch } from './save-sketch.ts';
 
 export const sketchRoutes: Routes<keyof typeof sketchEndpoints> = {
-  readRevision: async ({ database, actor, params }) => {
-    const view = await presentRevision(database, actor, params.revisionId);
+  readRevision: async ({ database, actor, revision }) => {
+    const view = await presentLoaded(database, actor, revision);
     return { body: view, version: view.version };
   },
 
