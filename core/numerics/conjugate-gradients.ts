@@ -56,12 +56,15 @@ export function conjugateGradients(
         return { status: 'breakdown', iterations, residual: norm(r) / norm(b) };
       }
       const alpha = rho / curvature;
+      let square = 0;
       for (let n = 0; n < x.length; n++) {
         x[n]! += alpha * p[n]!;
-        r[n]! -= alpha * q[n]!;
+        const left = r[n]! - alpha * q[n]!;
+        r[n] = left;
+        square += left * left;
       }
       iterations++;
-      if (norm(r) <= target) break;
+      if (Math.sqrt(square) <= target) break;
     }
     if (iterations >= options.maximumIterations) break;
   }

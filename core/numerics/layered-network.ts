@@ -18,8 +18,11 @@ export type LayeredNetwork = {
   anchor: Float64Array;
 };
 
-/** Compressed rows: the links of node n are entries start[n] … start[n + 1] − 1, each link stored at both ends. */
-export type Links = { start: Int32Array; node: Int32Array; g: Float64Array };
+/**
+ * Compressed rows: the links of node n are entries start[n] … start[n + 1] − 1, each link stored at both ends; `nodes` lists
+ * the nodes that have any.
+ */
+export type Links = { nodes: Int32Array; start: Int32Array; node: Int32Array; g: Float64Array };
 
 export const cellCount = (network: LayeredNetwork) => network.columns * network.rows * network.layers;
 export const nodeCount = (network: LayeredNetwork) => cellCount(network) + network.extras;
@@ -49,7 +52,8 @@ export function buildLinks(nodes: number, pairs: readonly { a: number; b: number
     node[fill[b]!] = a;
     g[fill[b]!++] = value;
   }
-  return { start, node, g };
+  const nodesWith = Int32Array.from({ length: nodes }, (_, n) => n).filter((n) => start[n + 1]! > start[n]!);
+  return { nodes: nodesWith, start, node, g };
 }
 
 /** Sum of the conductances at each node without its anchor, W/K. */
@@ -78,26 +82,37 @@ export function multiply(network: LayeredNetwork, diagonal: Float64Array, x: Flo
   const { columns, layers, gx, gy, gz, links } = network;
   const cells = cellCount(network);
   const sy = columns * layers;
-  for (let n = 0; n < x.length; n++) y[n] = diagonal[n]! * x[n]!;
-  for (let n = 0; n < cells; n++) {
-    const here = x[n]!;
-    const a = gx[n]!;
-    const b = gy[n]!;
-    const c = gz[n]!;
-    if (a !== 0) {
-      y[n]! -= a * x[n + layers]!;
-      y[n + layers]! -= a * here;
-    }
-    if (b !== 0) {
-      y[n]! -= b * x[n + sy]!;
-      y[n + sy]! -= b * here;
-    }
-    if (c !== 0) {
-      y[n]! -= c * x[n + 1]!;
-      y[n + 1]! -= c * here;
-    }
+  // Conductances are 0 at every far edge, so that inside the array no border needs a test.
+  for (let n = sy; n < cells - sy; n++) {
+    y[n] =
+      diagonal[n]! * x[n]! -
+      gx[n - layers]! * x[n - layers]! -
+      gx[n]! * x[n + layers]! -
+      gy[n - sy]! * x[n - sy]! -
+      gy[n]! * x[n + sy]! -
+      gz[n - 1]! * x[n - 1]! -
+      gz[n]! * x[n + 1]!;
   }
-  for (let n = 0; n < x.length; n++) {
-    for (let k = links.start[n]!; k < links.start[n + 1]!; k++) y[n]! -= links.g[k]! * x[links.node[k]!]!;
+  const rim = (from: number, to: number) => {
+    for (let n = from; n < to; n++) {
+      let s = diagonal[n]! * x[n]!;
+      if (n >= layers) s -= gx[n - layers]! * x[n - layers]!;
+      if (n + layers < cells) s -= gx[n]! * x[n + layers]!;
+      if (n >= sy) s -= gy[n - sy]! * x[n - sy]!;
+      if (n + sy < cells) s -= gy[n]! * x[n + sy]!;
+      if (n >= 1) s -= gz[n - 1]! * x[n - 1]!;
+      if (n + 1 < cells) s -= gz[n]! * x[n + 1]!;
+      y[n] = s;
+    }
+  };
+  rim(0, Math.min(sy, cells));
+  rim(Math.max(sy, cells - sy), cells);
+  for (let n = cells; n < x.length; n++) y[n] = diagonal[n]! * x[n]!;
+  const { nodes, start, node, g } = links;
+  for (let at = 0; at < nodes.length; at++) {
+    const n = nodes[at]!;
+    let s = 0;
+    for (let k = start[n]!; k < start[n + 1]!; k++) s += g[k]! * x[node[k]!]!;
+    y[n]! -= s;
   }
 }

@@ -16,6 +16,28 @@ export function factorLines(network: LayeredNetwork, diagonal: Float64Array, inv
   for (let n = cells; n < diagonal.length; n++) inverse[n] = 1 / diagonal[n]!;
 }
 
+/** One half sweep of red-black line Gauss–Seidel from x = 0: the columns with (i + j) mod 2 = colour alone. */
+export function solveColumns(
+  { columns, rows, layers, gz }: LayeredNetwork,
+  inverse: Float64Array,
+  b: Float64Array,
+  x: Float64Array,
+  colour: 0 | 1,
+) {
+  for (let j = 0; j < rows; j++) {
+    for (let i = (j + colour) & 1; i < columns; i += 2) {
+      const base = (j * columns + i) * layers;
+      let carried = b[base]! * inverse[base]!;
+      x[base] = carried;
+      for (let n = base + 1; n < base + layers; n++) {
+        carried = (b[n]! + gz[n - 1]! * carried) * inverse[n]!;
+        x[n] = carried;
+      }
+      for (let n = base + layers - 2; n >= base; n--) x[n]! += gz[n]! * inverse[n]! * x[n + 1]!;
+    }
+  }
+}
+
 /** One half sweep of red-black line Gauss–Seidel over the columns with (i + j) mod 2 = colour. */
 export function smoothColumns(
   network: LayeredNetwork,
@@ -26,21 +48,29 @@ export function smoothColumns(
 ) {
   const { columns, rows, layers, gx, gy, gz, links } = network;
   const sy = columns * layers;
+  const cells = rows * sy;
   const { start, node, g } = links;
   const before = new Float64Array(layers);
   for (let j = 0; j < rows; j++) {
+    const inner = j > 0 && j + 1 < rows;
     for (let i = (j + colour) & 1; i < columns; i += 2) {
       const base = j * sy + i * layers;
-      const linked = start[base + layers]! > start[base]!;
+      const end = base + layers;
+      const linked = start[end]! > start[base]!;
       if (linked) for (let l = 0; l < layers; l++) before[l] = x[base + l]!;
       let carried = 0;
-      for (let l = 0; l < layers; l++) {
-        const n = base + l;
+      for (let n = base; n < end; n++) {
         let s = b[n]!;
-        if (i > 0) s += gx[n - layers]! * x[n - layers]!;
-        if (i + 1 < columns) s += gx[n]! * x[n + layers]!;
-        if (j > 0) s += gy[n - sy]! * x[n - sy]!;
-        if (j + 1 < rows) s += gy[n]! * x[n + sy]!;
+        if (inner) {
+          // Conductances are 0 at every far edge, so that inside the array no border needs a test.
+          s +=
+            gx[n - layers]! * x[n - layers]! + gx[n]! * x[n + layers]! + gy[n - sy]! * x[n - sy]! + gy[n]! * x[n + sy]!;
+        } else {
+          if (i > 0) s += gx[n - layers]! * x[n - layers]!;
+          if (i + 1 < columns) s += gx[n]! * x[n + layers]!;
+          if (n >= sy) s += gy[n - sy]! * x[n - sy]!;
+          if (n + sy < cells) s += gy[n]! * x[n + sy]!;
+        }
         if (linked) {
           for (let k = start[n]!; k < start[n + 1]!; k++) {
             // A link inside the column takes the value from before the sweep, which keeps the sweep symmetric.
@@ -48,15 +78,12 @@ export function smoothColumns(
             s += g[k]! * (inside >= 0 && inside < layers ? before[inside]! : x[node[k]!]!);
           }
         }
-        if (l > 0) s += gz[n - 1]! * carried;
+        if (n > base) s += gz[n - 1]! * carried;
         carried = s * inverse[n]!;
         // The forward value is kept in x: nothing of this column is read again before the back substitution.
         x[n] = carried;
       }
-      for (let l = layers - 2; l >= 0; l--) {
-        const n = base + l;
-        x[n]! += gz[n]! * inverse[n]! * x[n + 1]!;
-      }
+      for (let n = end - 2; n >= base; n--) x[n]! += gz[n]! * inverse[n]! * x[n + 1]!;
     }
   }
 }

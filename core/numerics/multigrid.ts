@@ -1,7 +1,7 @@
 import { coarsen } from './coarsen.ts';
 import { factorDense, solveDense } from './dense-cholesky.ts';
 import { conductanceSums, multiply, nodeCount, type LayeredNetwork } from './layered-network.ts';
-import { factorLines, smoothColumns, smoothExtras } from './line-smoother.ts';
+import { factorLines, smoothColumns, smoothExtras, solveColumns } from './line-smoother.ts';
 
 type Level = {
   network: LayeredNetwork;
@@ -18,7 +18,8 @@ type Level = {
 /** Hierarchy of a network: built once, refreshed when only anchors (films) change. */
 export type Multigrid = { levels: Level[]; dense: Float64Array };
 
-const coarsestNodes = 320;
+/** A dense factor of this size costs less than the sweeps of one more level. */
+const coarsestNodes = 120;
 
 export function buildMultigrid(network: LayeredNetwork): Multigrid {
   const levels: Level[] = [];
@@ -91,7 +92,7 @@ function cycle(grid: Multigrid, depth: number) {
     return;
   }
   x.fill(0);
-  smoothColumns(network, inverse, b, x, 0);
+  solveColumns(network, inverse, b, x, 0);
   smoothColumns(network, inverse, b, x, 1);
   smoothExtras(network, inverse, b, x, false);
   multiply(network, diagonal, x, residual);

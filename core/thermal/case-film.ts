@@ -1,4 +1,4 @@
-import { blendedFilm, forcedFilm } from './forced-convection.ts';
+import { blendedFilm, plateFilm } from './forced-convection.ts';
 import type { PackageNodes } from './package-star.ts';
 
 /**
@@ -14,7 +14,7 @@ export function caseFilm(
   pressure: number,
 ): number {
   if (speedMPerS === 0) return natural;
-  return blendedFilm(natural, forcedFilm(speedMPerS, 0, nodes.bodySideM, filmK, pressure));
+  return blendedFilm(natural, plateFilm(speedMPerS, filmK, pressure)(0, nodes.bodySideM));
 }
 
 /** Case top between its resistance and its film, W/K; 0 without a film. */

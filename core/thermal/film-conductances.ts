@@ -3,12 +3,11 @@ import { boundsOf, perimeter, polygonArea } from '#core/geometry/polygon.ts';
 import { celsiusOffset } from '#core/units.ts';
 import { pressureRatio } from './air-properties.ts';
 import { airReturn, type AirReturn } from './air-return.ts';
-import { AirStreaks } from './air-streaks.ts';
 import type { BoardModel } from './board-model.ts';
 import { caseFilm } from './case-film.ts';
 import { drivingRise } from './driving-rise.ts';
 import { flowDistances } from './flow-distance.ts';
-import { blendedFilm, boardEnhancement, forcedFilm } from './forced-convection.ts';
+import { blendedFilm, boardEnhancement, plateFilm } from './forced-convection.ts';
 import { naturalFilm, type Attitude } from './natural-convection.ts';
 import { radiationFilm } from './radiation.ts';
 
@@ -59,7 +58,7 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
     top: new Float64Array(cells),
     bottom: new Float64Array(cells),
     cases: new Float64Array(model.packages.length),
-    air: moving ? airReturn(model, new AirStreaks(model.grid, moving.towardDeg)) : null,
+    air: moving ? airReturn(model, moving.towardDeg) : null,
   };
   const distances = moving ? flowDistances(model.grid, moving.towardDeg) : null;
   const sides = [
@@ -67,25 +66,25 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
     { face: model.bottom, offset: model.layers.count - 1, attitude: upright ? 'upright' : 'face-down', key: 'bottom' },
   ] as const;
 
-  const useFixed = (films: { top: number; bottom: number }) => {
+  const setFixed = (films: { top: number; bottom: number }) => {
     for (const { face, key } of sides) face.area.forEach((area, cell) => (out[key][cell] = films[key] * area));
     model.packages.forEach((nodes, index) => (out.cases[index] = films[nodes.side] * nodes.caseAreaM2));
   };
   const update: Films['update'] = (rise, caseRise) => {
-    if (fixed !== null) return useFixed(typeof fixed === 'number' ? { top: fixed, bottom: fixed } : fixed);
+    if (fixed !== null) return setFixed(typeof fixed === 'number' ? { top: fixed, bottom: fixed } : fixed);
     for (const { face, offset, attitude, key } of sides) {
       const driving = drivingRise(face, rise, offset, model.layers.count);
       const natural = naturalFilm(attitude as Attitude, ambientK, driving.rise, length * driving.shrink, pressure);
       const filmK = ambientK + driving.rise / 2;
-      const streaks = out.air?.[key];
+      const plate = moving ? plateFilm(moving.speedMPerS, filmK, pressure) : null;
+      const { air } = out;
       for (let cell = 0; cell < cells; cell++) {
         let convection = natural;
-        if (moving && distances && streaks) {
-          const { near, far } = distances;
-          const forced = boardEnhancement * forcedFilm(moving.speedMPerS, near[cell]!, far[cell]!, filmK, pressure);
-          convection = blendedFilm(natural, forced);
-          streaks.face.film[cell] = convection;
-          streaks.face.forced[cell] = (forced / convection) ** 3;
+        if (plate && distances && air) {
+          const stream = boardEnhancement * plate(distances.near[cell]!, distances.far[cell]!);
+          convection = blendedFilm(natural, stream);
+          air.convection[key][cell] = convection;
+          air.forced[key][cell] = (stream / convection) ** 3;
         }
         const area = face.area[cell]!;
         if (area === 0) {

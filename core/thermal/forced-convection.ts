@@ -12,24 +12,23 @@ export const criticalReynolds = 5e5;
 export const boardEnhancement = 1.75;
 
 /**
- * Mean film coefficient of a flat plate in parallel flow between x1 and x2 from the leading edge, W/(m²·K), uniform heat flux:
- * local Nu = 0.453·Re^½·Pr^⅓ laminar, 0.0308·Re^0.8·Pr^⅓ beyond Re 5e5 (Incropera, 7.2.4; Cengel, 7-2).
+ * Mean film coefficient of a flat plate in parallel flow between two distances from its leading edge, m; W/(m²·K), uniform heat
+ * flux: local Nu = 0.453·Re^½·Pr^⅓ laminar, 0.0308·Re^0.8·Pr^⅓ beyond Re 5e5 (Incropera, 7.2.4; Cengel, 7-2; Pr from 0.6).
  * A board is heated by its parts, not held at one temperature, so the flux form is the fitting one.
  */
-export function forcedFilm(speedMPerS: number, x1M: number, x2M: number, filmK: number, pressure: number): number {
+export function plateFilm(speedMPerS: number, filmK: number, pressure: number): (fromM: number, toM: number) => number {
   const air = airProperties(filmK, pressure);
   const perMetre = speedMPerS / air.viscosity;
   const critical = criticalReynolds / perMetre;
-  const cubeRoot = air.prandtl ** (1 / 3);
+  const scale = air.conductivity * air.prandtl ** (1 / 3);
   // Integrals of the local coefficient over x, so that the singular leading edge needs no care.
   const laminar = (x: number) => 0.906 * Math.sqrt(perMetre * x);
   const turbulent = (x: number) => (0.0308 / 0.8) * (perMetre * x) ** 0.8;
-  const a = Math.min(x1M, critical);
-  const b = Math.min(x2M, critical);
-  const c = Math.max(x1M, critical);
-  const d = Math.max(x2M, critical);
-  const integral = laminar(b) - laminar(a) + (d > c ? turbulent(d) - turbulent(c) : 0);
-  return (air.conductivity * cubeRoot * integral) / (x2M - x1M);
+  return (fromM, toM) => {
+    let integral = laminar(Math.min(toM, critical)) - laminar(Math.min(fromM, critical));
+    if (toM > critical) integral += turbulent(toM) - turbulent(Math.max(fromM, critical));
+    return (scale * integral) / (toM - fromM);
+  };
 }
 
 /** Natural and forced convection together: the cube root of the sum of cubes (Churchill 1977; common practice for assisting flow). */
