@@ -55,7 +55,7 @@ export function drawIsotherms(sheet: Sheet, board: Outlined, { lines, limits }: 
 }
 
 /**
- * Temperatures beside the isotherms, names beside the limits.
+ * Temperatures beside the isotherms, names beside the limits. A limit that parts leave no room for is named below the scale alone.
  * @param occupied where no figure may stand, because a part or its own figures do
  */
 export function drawIsothermLabels(
@@ -69,11 +69,9 @@ export function drawIsothermLabels(
     polygonContains(board.outline.points, ...point) &&
     !board.outline.cutouts.some((ring) => polygonContains(ring, ...point));
   const free = (point: Mm) => onBoard(point) && !occupied(point);
-  // A limit is named in any case, if need be over a part.
-  const named = (point: Mm, line: Isotherm) => limits.some((limit) => limit.line === line) && onBoard(point);
   const apartMm = 46 / camera.pxPerMm;
   const ordered = [...limits.map(({ line }) => line), ...lines];
-  for (const { valueC, at } of isothermLabels(ordered, free, apartMm, named)) {
+  for (const { valueC, at } of isothermLabels(ordered, free, apartMm)) {
     const limit = limits.find(({ line }) => line.valueC === valueC);
     const text = limit ? `${limit.label} ${formatQuantity(valueC, '°C', 0)}` : formatGiven(valueC);
     drawText(sheet, text, toScreen(camera, view, at), {

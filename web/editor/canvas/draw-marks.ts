@@ -1,4 +1,5 @@
 import type { Board } from '#core/board/document.ts';
+import { type LabelBox, placeLabels } from '#core/drawing/place-labels.ts';
 import { formatQuantity } from '#core/format.ts';
 import type { Verdict } from '#core/result/result.ts';
 import { toScreen } from '../camera.ts';
@@ -32,36 +33,82 @@ export function occupiedBy(sheet: Sheet, board: Board): (point: readonly [number
   return ([x, y]) => boxes.some((box) => x >= box.left && x <= box.right && y >= box.bottom && y <= box.top);
 }
 
-/** Reference, junction temperature and verdict shape of every regulator on a plate above its body. */
+const plateHeight = 20;
+const plateGap = 7;
+
+type Plate = {
+  mark: PartMark | undefined;
+  ref: string;
+  temperature: string;
+  refWidth: number;
+  body: LabelBox;
+  width: number;
+};
+
+/** Reference, junction temperature and verdict shape of every regulator on a plate beside its body; plates keep clear of each other. */
 export function drawMarks(sheet: Sheet, board: Board, marks: ReadonlyMap<string, PartMark>, isPreview: boolean): void {
-  const { pen, palette, camera, view } = sheet;
-  for (const regulator of board.regulators) {
-    const mark = marks.get(regulator.ref);
-    const box = boxOf([bodyRing(board, regulator) ?? [regulator.at]]);
-    if (!box) continue;
-    const [x, top] = toScreen(camera, view, [(box.left + box.right) / 2, box.top]);
-    const temperature = mark ? ` ${formatQuantity(mark.temperatureC, '°C')}` : '';
-    pen.font = `600 ${sizePx}px 'Source Sans 3', sans-serif`;
-    const refWidth = pen.measureText(regulator.ref).width;
-    const width = refWidth + pen.measureText(temperature).width + (mark ? shapePx + 6 : 0) + 12;
-    const y = top - 17;
-    pen.fillStyle = palette.panel;
-    pen.beginPath();
-    pen.rect(x - width / 2, y - 10, width, 20);
-    pen.fill();
-    strokePath(sheet, palette.ink, 1, isPreview ? [3, 2] : []);
-    let left = x - width / 2 + 6;
-    if (mark) {
-      drawVerdict(sheet, mark.verdict, [left + shapePx / 2, y], shapePx / 2);
-      left += shapePx + 5;
-    }
-    pen.textAlign = 'left';
-    pen.textBaseline = 'middle';
-    pen.fillStyle = palette.ink;
-    pen.fillText(regulator.ref, left, y + 1);
-    pen.font = `${sizePx}px 'Source Sans 3', sans-serif`;
-    pen.fillText(temperature, left + refWidth, y + 1);
+  const { view } = sheet;
+  const plates = board.regulators.map((regulator): Plate => plateOf(sheet, board, regulator, marks.get(regulator.ref)));
+  const sources = board.sources.map(({ at, sizeMm }) =>
+    screenBox(sheet, [
+      [at[0] - sizeMm[0] / 2, at[1] - sizeMm[1] / 2],
+      [at[0] + sizeMm[0] / 2, at[1] + sizeMm[1] / 2],
+    ]),
+  );
+  const places = placeLabels(
+    plates.map(({ body, width }) => ({ box: body, width, height: plateHeight })),
+    { x: 0, y: 0, width: view.width, height: view.height },
+    [...plates.map(({ body }) => body), ...sources],
+    plateGap,
+  );
+  plates.forEach((plate, index) => {
+    const place = places[index];
+    if (place) drawPlate(sheet, plate, place, isPreview);
+  });
+}
+
+function plateOf(
+  sheet: Sheet,
+  board: Board,
+  regulator: Board['regulators'][number],
+  mark: PartMark | undefined,
+): Plate {
+  const { pen } = sheet;
+  const temperature = mark ? ` ${formatQuantity(mark.temperatureC, '°C')}` : '';
+  pen.font = `600 ${sizePx}px 'Source Sans 3', sans-serif`;
+  const refWidth = pen.measureText(regulator.ref).width;
+  const width = refWidth + pen.measureText(temperature).width + (mark ? shapePx + 6 : 0) + 12;
+  const body = screenBox(sheet, bodyRing(board, regulator) ?? [regulator.at]);
+  return { mark, ref: regulator.ref, temperature, refWidth, body, width };
+}
+
+function screenBox({ camera, view }: Sheet, points: readonly (readonly [number, number])[]): LabelBox {
+  const shown = points.map((point) => toScreen(camera, view, point));
+  const [xs, ys] = [shown.map(([x]) => x), shown.map(([, y]) => y)];
+  const [x, y] = [Math.min(...xs), Math.min(...ys)];
+  return { x, y, width: Math.max(...xs) - x, height: Math.max(...ys) - y };
+}
+
+function drawPlate(sheet: Sheet, plate: Plate, { x, y, width }: LabelBox, isPreview: boolean): void {
+  const { pen, palette } = sheet;
+  pen.fillStyle = palette.panel;
+  pen.beginPath();
+  pen.rect(x, y, width, plateHeight);
+  pen.fill();
+  strokePath(sheet, palette.ink, 1, isPreview ? [3, 2] : []);
+  const middle = y + plateHeight / 2;
+  let left = x + 6;
+  if (plate.mark) {
+    drawVerdict(sheet, plate.mark.verdict, [left + shapePx / 2, middle], shapePx / 2);
+    left += shapePx + 5;
   }
+  pen.textAlign = 'left';
+  pen.textBaseline = 'middle';
+  pen.fillStyle = palette.ink;
+  pen.font = `600 ${sizePx}px 'Source Sans 3', sans-serif`;
+  pen.fillText(plate.ref, left, middle + 1);
+  pen.font = `${sizePx}px 'Source Sans 3', sans-serif`;
+  pen.fillText(plate.temperature, left + plate.refWidth, middle + 1);
 }
 
 /** The shapes of the verdict marks: disc, half disc, triangle, ring. */
