@@ -10,6 +10,9 @@ pg.types.setTypeParser(bigint, Number);
 pg.types.setTypeParser(numeric, Number);
 pg.types.setTypeParser(date, (value) => value);
 
+// Knex prints every failed connection by itself; the caller gets the same fault and tells it once.
+const quiet = { warn: () => {}, error: () => {}, debug: () => {}, deprecate: () => {} };
+
 /**
  * Pool of connections to the database.
  * @param most connections at a time; a caller waits at most 3 s for one
@@ -20,5 +23,6 @@ export function openDatabase(url: string, most = 10): Knex {
     connection: { connectionString: url, application_name: 'dropwatt', connectionTimeoutMillis: 3000 },
     pool: { min: 0, max: most },
     acquireConnectionTimeout: 3000,
+    log: quiet,
   });
 }

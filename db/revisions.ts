@@ -94,13 +94,14 @@ export async function findRevision(database: Database, teamId: string, id: strin
   return row ? revision(row) : null;
 }
 
-/** As `findRevision`, holding the row until the transaction ends. */
+/**
+ * As `findRevision`, holding the row until the transaction ends. Locked by itself and read afterwards: after a wait
+ * PostgreSQL looks at the row anew, but joins it to what it was joined to before, and a change of `changed_by` would
+ * make it vanish.
+ */
 export async function lockRevision(database: Database, teamId: string, id: string): Promise<Revision | null> {
-  const row: Row | undefined = await selected(database)
-    .where({ 'r.team_id': teamId, 'r.id': id })
-    .forUpdate('r')
-    .first();
-  return row ? revision(row) : null;
+  const held: unknown = await database('revisions').where({ team_id: teamId, id }).forUpdate().first('id');
+  return held === undefined ? null : findRevision(database, teamId, id);
 }
 
 /** Every revision of an assembly, newest first. */

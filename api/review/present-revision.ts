@@ -27,12 +27,11 @@ export async function presentLoaded(
   revision: Revision,
 ): Promise<RevisionView> {
   const { id } = revision;
-  const [authors, signatures, reasons, openComments] = await Promise.all([
-    authorsOf(database, id),
-    listSignatures(database, id, revision.sketchVersion),
-    listReasons(database, id),
-    countOpenComments(database, id),
-  ]);
+  // One after the other: `database` may be a transaction, which is a single connection.
+  const authors = await authorsOf(database, id);
+  const signatures = await listSignatures(database, id, revision.sketchVersion);
+  const reasons = await listReasons(database, id);
+  const openComments = await countOpenComments(database, id);
   const isAuthor = authors.some((author) => author.id === actor.member.id);
   return {
     id,

@@ -60,8 +60,47 @@ test('reset – known and unknown address – are answered alike; the link works
 test('members – the last administrator – cannot give the role away', async () => {
   const members = await administrator.get('/api/v1/members').expect(200);
   const own = members.body.items.find(({ email }: { email: string }) => email === team.emailOf('administrator'));
-  const answer = await administrator.patch(`/api/v1/members/${own.id}`).send({ roles: ['test-engineer'] });
-  expect([409, 422]).toContain(answer.status);
+  const answers = [
+    await administrator.patch(`/api/v1/members/${own.id}`).send({ roles: ['test-engineer'] }),
+    await administrator.delete(`/api/v1/members/${own.id}`),
+  ];
+  for (const answer of answers) expect([answer.status, answer.body.code]).toEqual([409, 'last-administrator']);
+});
+
+test('members and invitations – to the administrator of another team – do not exist', async () => {
+  const theirs = await (await addTeam(service, database, 'Neighbours')).signIn('administrator');
+  const [{ id: memberId }] = (await administrator.get('/api/v1/members')).body.items;
+  const invited = { name: 'Ole', email: 'ole@people.example', roles: ['test-engineer'] };
+  const invitation = await administrator.post('/api/v1/invitations').send(invited).expect(201);
+  await theirs.patch(`/api/v1/members/${memberId}`).send({ name: 'Mine' }).expect(404);
+  await theirs.delete(`/api/v1/members/${memberId}`).expect(404);
+  await theirs.delete(`/api/v1/invitations/${invitation.body.id}`).expect(404);
+  expect((await theirs.get('/api/v1/invitations')).body.items).toEqual([]);
+  await administrator.delete(`/api/v1/invitations/${invitation.body.id}`).expect(204);
+});
+
+test('invitation and reset – links that are too old – open nothing', async () => {
+  const invited = { name: 'Late', email: 'late@people.example', roles: ['test-engineer'] };
+  await administrator.post('/api/v1/invitations').send(invited).expect(201);
+  const invitation = await tokenTo(invited.email, 'invitations');
+  await service
+    .anyone()
+    .post('/api/v1/password-resets')
+    .send({ email: team.emailOf('layout-designer') });
+  const reset = await tokenTo(team.emailOf('layout-designer'), 'password-reset');
+  const { knex } = database;
+  for (const table of ['invitations', 'password_resets'])
+    await knex(table).update({ expires_at: knex.raw("now() - interval '1 s'") });
+  const accepted = await service
+    .anyone()
+    .post('/api/v1/invitations/accept')
+    .send({ token: invitation, name: 'Late', password: 'seven quiet canals' });
+  expect([accepted.status, accepted.body.code]).toEqual([422, 'link-ended']);
+  const completed = await service
+    .anyone()
+    .post('/api/v1/password-resets/complete')
+    .send({ token: reset, password: 'seven quiet canals' });
+  expect([completed.status, completed.body.code]).toEqual([422, 'link-ended']);
 });
 
 test('outbox – accepted, refused for now, refused for good – is sent once, kept, given up', async () => {
@@ -103,7 +142,7 @@ test('outbox – accepted, refused for now, refused for good – is sent once, k
   const rows = await database
     .knex('mail_outbox')
     .whereLike('recipient', '%@people.example')
-    .whereNotIn('recipient', ['pia@people.example']);
+    .whereNotIn('recipient', ['pia@people.example', 'ole@people.example', 'late@people.example']);
   const of = (recipient: string) => rows.find((row) => row.recipient === recipient);
   expect(seen).toHaveLength(1);
   expect(seen[0]).toContain(of('fine@people.example').message_id);
@@ -112,4 +151,6 @@ test('outbox – accepted, refused for now, refused for good – is sent once, k
   expect(of('fine@people.example').text).toBe('');
   expect(of('later@people.example')).toMatchObject({ sent_at: null, failed_at: null });
   expect(of('never@people.example').failed_at).not.toBeNull();
+  const told = await administrator.get('/api/v1/audit-events?kind=mail.given-up').expect(200);
+  expect(told.body.items).toMatchObject([{ subject: 'never@people.example', facts: { tries: 1 } }]);
 });

@@ -44,13 +44,21 @@ test('a save – over an old version – says who saved and when, and stores not
   expect(read.body.board.regulators[0].powerW).toBe(0.4);
 });
 
-test('two saves at once – exactly one wins', async () => {
+test('two saves at once – twelve times over – exactly one wins, the other learns who did', async () => {
   const { revisionId } = await newRevision(designer);
-  const both = await Promise.all([
-    designer.put(sketch(revisionId)).set('If-Match', '"1"').send(tinyBoard(0.6)),
-    lead.put(sketch(revisionId)).set('If-Match', '"1"').send(tinyBoard(0.7)),
-  ]);
-  expect(new Set(both.map(({ status }) => status))).toEqual(new Set([200, 412]));
+  for (let version = 1; version <= 12; version++) {
+    const save = (agent: Agent, powerW: number) =>
+      agent.put(sketch(revisionId)).set('If-Match', `"${version}"`).send(tinyBoard(powerW));
+    const both = await Promise.all([save(designer, 0.6), save(lead, 0.7)]);
+    const lost = both.find(({ status }) => status !== 200);
+    expect(both.map(({ status }) => status).sort()).toEqual([200, 412]);
+    expect(lost?.body.current).toMatchObject({
+      version: version + 1,
+      savedBy: lost === both[0] ? 'hardware-lead' : 'layout-designer',
+    });
+  }
+  const versions = await designer.get(`${sketch(revisionId)}/versions`).expect(200);
+  expect(versions.body.items).toHaveLength(13);
 });
 
 test('a save whose answer was lost – sent again – is answered as the first time', async () => {
@@ -76,6 +84,17 @@ test('creating – twice with one Idempotency-Key – makes one assembly', async
   const [first, second] = [await send(), await send()];
   expect([first.status, second.status]).toEqual([201, 201]);
   expect(second.body.id).toBe(first.body.id);
+  // Also while the first one is still under way: neither is turned away, and there is one assembly.
+  const both = await Promise.all(
+    ['', ''].map(() =>
+      designer
+        .post('/api/v1/assemblies')
+        .set('Idempotency-Key', 'a-key-of-the-tests-0002')
+        .send({ ...body, number: 'IDEM-2' }),
+    ),
+  );
+  expect(both.map(({ status }) => status)).toEqual([201, 201]);
+  expect(both[0]!.body).toEqual(both[1]!.body);
   const other = await designer
     .post('/api/v1/assemblies')
     .set('Idempotency-Key', 'a-key-of-the-tests-0001')

@@ -13,13 +13,30 @@ const tables = async () => {
   return rows.map(({ tablename }) => tablename).filter((name) => !name.startsWith('knex_'));
 };
 
+/** Everything that a schema consists of, as text: columns, constraints, indexes, triggers and functions. */
+const schema = async () => {
+  const { rows } = await database.knex.raw<{ rows: { line: string }[] }>(`
+    select format('%s.%s %s %s %s', table_name, column_name, udt_name, is_nullable, column_default) as line
+      from information_schema.columns where table_schema = 'public' and table_name not like 'knex_%'
+    union all select conrelid::regclass || ' ' || conname || ' ' || pg_get_constraintdef(oid)
+      from pg_constraint where connamespace = 'public'::regnamespace and conrelid::regclass::text not like 'knex_%'
+    union all select indexdef from pg_indexes where schemaname = 'public' and tablename not like 'knex_%'
+    union all select pg_get_triggerdef(oid) from pg_trigger where not tgisinternal
+    union all select pg_get_functiondef(oid) from pg_proc where pronamespace = 'public'::regnamespace
+    order by line`);
+  return rows.map(({ line }) => line);
+};
+
 test('migrations – down and up again – leave nothing and bring everything back', async () => {
   const before = await tables();
+  const whole = await schema();
   expect(before.length).toBeGreaterThan(10);
   for (let left = true; left;) left = (await rollBackDatabase(database.url)).length > 0;
   expect(await tables()).toEqual([]);
+  expect(await schema()).toEqual([]);
   await migrateDatabase(database.url);
   expect(await tables()).toEqual(before);
+  expect(await schema()).toEqual(whole);
 });
 
 test('every table – has a primary key; every foreign key – an index that begins with it', async () => {

@@ -19,6 +19,7 @@ export const allRoles: readonly Role[] = [
   'administrator',
 ];
 export const password = 'nine brass herons';
+export const sessionSecret = 'a secret of the tests, long enough for all of them';
 export const logger = pino({ level: 'silent' });
 const root = join(import.meta.dirname, '../..');
 /** The lowest cost that bcrypt knows: tests hash often. */
@@ -39,7 +40,7 @@ export function openService(database: TestDatabase) {
         return Promise.resolve();
       },
     },
-    sessionSecret: 'a secret of the tests, long enough for all of them',
+    sessionSecret,
     sessionHours: 1,
     publicUrl: 'http://127.0.0.1',
     trustProxy: 0,
