@@ -5,9 +5,10 @@ import { buildMultigrid, type Multigrid } from '#core/numerics/multigrid.ts';
 import { boardLayers, type BoardLayers } from './board-layers.ts';
 import { buildCellGrid, defaultCellMm, type CellGrid } from './cell-grid.ts';
 import { cellWeights, type CellWeights } from './cell-weights.ts';
-import { buildCopperMap, type CopperMap } from './copper-map.ts';
-import { faceConductances } from './face-conductance.ts';
+import { buildCopperMap } from './copper-map.ts';
 import { faces, type Face } from './film-areas.ts';
+import { filledShares, gridConductances } from './grid-conductances.ts';
+import { landCorrections } from './land-corrections.ts';
 import { packageStar, type PackageNodes } from './package-star.ts';
 import { viaPairs } from './via-pairs.ts';
 
@@ -25,13 +26,22 @@ export type BoardModel = {
   bottom: Face;
   /** Share of each cell that is board. */
   filled: Float64Array;
+  /** Whether lands are corrected for what the cells misjudge around them. */
+  correctLands: boolean;
 };
+
+/** Cells coarser than this are a preview, whose lands go uncorrected unless it is asked for, mm. */
+const coarsestCorrectedMm = 1.1;
 
 /**
  * @param options.cellMm cell size in mm; chosen from the board when left out
+ * @param options.correctLands by default for cells up to 1.1 mm
  * @throws BoardTooLarge beyond the stated maximum of unknowns
  */
-export function buildBoardModel(board: Board, options: { cellMm?: number | undefined } = {}): BoardModel {
+export function buildBoardModel(
+  board: Board,
+  options: { cellMm?: number | undefined; correctLands?: boolean } = {},
+): BoardModel {
   const layers = boardLayers(board);
   const grid = buildCellGrid(board, options.cellMm ?? defaultCellMm(board, layers.count), layers.count);
   const map = buildCopperMap(board, grid);
@@ -42,11 +52,13 @@ export function buildBoardModel(board: Board, options: { cellMm?: number | undef
 
   const pairs: { a: number; b: number; g: number }[] = viaPairs(board, map, layers);
   const packages: PackageNodes[] = [];
+  const correctLands = options.correctLands ?? Math.max(grid.dxMm, grid.dyMm) <= coarsestCorrectedMm;
+  const corrections = correctLands ? landCorrections(board, grid, layers) : new Map<string, Map<string, number>>();
   let next = cells * layers.count;
   for (const regulator of board.regulators) {
     const model = board.packages[board.parts[regulator.part]?.package ?? ''];
     if (!model) continue;
-    const star = packageStar(board, map, regulator, model, next, nodeOf);
+    const star = packageStar(board, map, regulator, model, corrections, next, nodeOf);
     next += star.used;
     pairs.push(...star.pairs);
     packages.push(star.nodes);
@@ -85,35 +97,6 @@ export function buildBoardModel(board: Board, options: { cellMm?: number | undef
     top,
     bottom,
     filled,
+    correctLands,
   };
-}
-
-function filledShares({ grid, inside }: CopperMap): Float64Array {
-  const { columns, split } = grid;
-  const filled = new Float64Array(columns * grid.rows);
-  const subColumns = columns * split;
-  for (let at = 0; at < inside.length; at++) {
-    if (!inside[at]) continue;
-    filled[Math.floor(Math.floor(at / subColumns) / split) * columns + Math.floor((at % subColumns) / split)]! += 1;
-  }
-  return filled.map((count) => count / (split * split));
-}
-
-function gridConductances(map: CopperMap, layers: BoardLayers, filled: Float64Array) {
-  const { columns, rows, dxMm, dyMm } = map.grid;
-  const size = columns * rows * layers.count;
-  const [gx, gy, gz] = [new Float64Array(size), new Float64Array(size), new Float64Array(size)];
-  const area = dxMm * dyMm * 1e-6;
-  const bare = { net: new Int16Array(map.inside.length), sheet: new Float32Array(map.inside.length) };
-  for (let l = 0; l < layers.count; l++) {
-    const copper = map.layers[layers.copper.indexOf(l)] ?? bare;
-    const face = faceConductances(map, copper, Math.max(layers.laminate[l]!, 1e-7));
-    for (let cell = 0; cell < columns * rows; cell++) {
-      const n = cell * layers.count + l;
-      gx[n] = face.gx[cell]!;
-      gy[n] = face.gy[cell]!;
-      if (l + 1 < layers.count) gz[n] = layers.through[l]! * area * filled[cell]!;
-    }
-  }
-  return { gx, gy, gz };
 }

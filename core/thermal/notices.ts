@@ -1,10 +1,11 @@
 import type { Condition } from '#core/board/condition.ts';
 import type { BoardModel } from './board-model.ts';
+import { filmNotices } from './film-notices.ts';
 import type { ThermalNotice } from './solution.ts';
 import type { Rises } from './solve-rises.ts';
 
 /** What the reader of a solution must know about its range of validity. */
-export function noticesOf(model: BoardModel, condition: Condition, { rise }: Rises): ThermalNotice[] {
+export function noticesOf(model: BoardModel, condition: Condition, solved: Rises): ThermalNotice[] {
   const notices: ThermalNotice[] = [];
   for (const nodes of model.packages) {
     if (nodes.lands.every((land) => land.weights.cell.length === 0)) {
@@ -20,14 +21,8 @@ export function noticesOf(model: BoardModel, condition: Condition, { rise }: Ris
       });
     }
   }
-  if (condition.altitudeM > 11000) {
-    notices.push({
-      code: 'altitude-range',
-      ref: null,
-      message: 'The air pressure is stated for altitudes up to 11 000 m.',
-    });
-  }
-  const hottest = rise.reduce((most, value) => Math.max(most, value), 0);
+  notices.push(...filmNotices(model, condition, solved));
+  const hottest = solved.rise.reduce((most, value) => Math.max(most, value), 0);
   if (hottest > 250) {
     notices.push({
       code: 'rise-range',

@@ -14,7 +14,7 @@ import { solveRises, type Rises } from './solve-rises.ts';
 /**
  * Temperatures of a board in one condition.
  * @param options.start an earlier solution of the same model, for a warm start
- * @param options.gridError whether to solve on two coarser grids for the grid error (Roache)
+ * @param options.gridError whether to solve on cells of twice the size too, for the grid error (Roache)
  * @returns a record whose status says whether its numbers may be used; never throws for a numerical reason
  */
 export function solveCondition(
@@ -32,7 +32,7 @@ export function solveCondition(
     status === 'converged'
       ? adjointLedger(model, heat, solved, earlier?.influences)
       : { ledger: [] as LedgerEntry[], influences: [] };
-  const coarser = options.gridError && status === 'converged' ? coarserJunctions(model, condition, heat) : [];
+  const coarser = options.gridError && status === 'converged' ? coarserJunctions(model, condition, heat) : null;
   const share = modelErrorShareOf(condition);
   const regulators = new Map<string, RegulatorHeat>();
   model.packages.forEach((nodes, index) => {
@@ -51,9 +51,7 @@ export function solveCondition(
       neighboursK,
       boardK: junctionK - preheatedAirK - neighboursK - packageK,
       packageK,
-      gridErrorK: coarser.length
-        ? gridError([junctionK, ...coarser.map((rises) => rises.get(nodes.ref) ?? NaN)])
-        : null,
+      gridErrorK: coarser ? gridError([junctionK, coarser.get(nodes.ref) ?? NaN]) : null,
       modelErrorK: share * junctionK,
     });
   });
@@ -92,33 +90,29 @@ const startOf = new WeakMap<ThermalSolution, { solved: Rises; influences: Influe
 const worst = (values: (number | null)[]) =>
   values.every((value) => value === null) ? null : Math.max(...values.map((value) => value ?? 0));
 
-function coarserJunctions(model: BoardModel, condition: Condition, heat: HeatInput): Map<string, number>[] {
-  const coarser = coarserOf.get(model) ?? coarserModels(model);
-  coarserOf.set(model, coarser);
-  return coarser.map((coarse) => {
-    const { rise } = solveRises(coarse, condition, heat);
-    return new Map(coarse.packages.map((nodes) => [nodes.ref, rise[nodes.junction]!]));
-  });
+/** Junction rises on cells of twice the size. */
+function coarserJunctions(model: BoardModel, condition: Condition, heat: HeatInput): Map<string, number> {
+  const cellMm = 2 * Math.max(model.grid.dxMm, model.grid.dyMm);
+  const coarse = coarserOf.get(model) ?? buildBoardModel(model.board, { cellMm, correctLands: model.correctLands });
+  coarserOf.set(model, coarse);
+  const { rise } = solveRises(coarse, condition, heat);
+  return new Map(coarse.packages.map((nodes) => [nodes.ref, rise[nodes.junction]!]));
 }
 
-/** Coarser models of a model, so that many conditions share them. */
-const coarserOf = new WeakMap<BoardModel, BoardModel[]>();
-
-function coarserModels(model: BoardModel): BoardModel[] {
-  const cellMm = Math.max(model.grid.dxMm, model.grid.dyMm);
-  return [2, 4].map((factor) => buildBoardModel(model.board, { cellMm: cellMm * factor }));
-}
+/** Coarser model of a model, so that many conditions share it. */
+const coarserOf = new WeakMap<BoardModel, BoardModel>();
 
 function hottestLand(model: BoardModel, { rise }: Rises, index: number): number {
-  const { lands, side } = model.packages[index]!;
+  const { lands, side, junction } = model.packages[index]!;
   const offset = side === 'top' ? 0 : model.layers.count - 1;
   const means = lands
     .filter((land) => land.weights.cell.length > 0)
-    .map(({ weights, slug }) => {
-      if (slug !== null) return rise[slug]!;
-      let mean = 0;
-      weights.cell.forEach((cell, k) => (mean += weights.weight[k]! * rise[cell * model.layers.count + offset]!));
-      return mean;
+    .map(({ weights, slug, kPerW, correctionKPerW }) => {
+      let mean = slug === null ? 0 : rise[slug]!;
+      if (slug === null) {
+        weights.cell.forEach((cell, k) => (mean += weights.weight[k]! * rise[cell * model.layers.count + offset]!));
+      }
+      return mean + (correctionKPerW * (rise[junction]! - mean)) / kPerW;
     });
   return means.length ? Math.max(...means) : 0;
 }
