@@ -127,6 +127,13 @@ test('issue – three signatures – freezes the revision, also against SQL, and
     /frozen/,
   );
   await expect(knex('signatures').where({ revision_id: revisionId }).delete()).rejects.toThrow(/frozen/);
+  const { result_id: resultId } = await knex('revisions').where({ id: revisionId }).first('result_id');
+  await expect(knex('results').where({ id: resultId }).update({ verdict: 'over' })).rejects.toThrow(/frozen/);
+  await expect(knex('heat_fields').where({ result_id: resultId }).delete()).rejects.toThrow(/frozen/);
+  // Superseding is the one change that is left, and only that.
+  await expect(
+    knex('revisions').where({ id: revisionId }).update({ state: 'superseded', sketch_hash: 'other' }),
+  ).rejects.toThrow(/frozen/);
 
   const next = await designer.post(`/api/v1/assemblies/${assemblyId}/revisions`).send({ from: revisionId }).expect(201);
   expect(next.body.letter).toBe('B');
@@ -168,5 +175,6 @@ test('audit trail – after all of that – tells it in order and takes no chang
   const sequence = answer.body.items.map((event: { sequence: number }) => event.sequence);
   expect(sequence).toEqual([...sequence].sort((a: number, b: number) => b - a));
   await expect(database.knex('audit_events').delete()).rejects.toThrow(/append-only/);
+  await expect(database.knex.raw('truncate audit_events')).rejects.toThrow(/append-only/);
   await expect(database.knex('audit_events').update({ kind: 'sketch.saved' })).rejects.toThrow(/append-only/);
 });
