@@ -21,7 +21,7 @@ const allowed: Record<string, string[]> = {
   test: ['test', 'web', 'api', 'db', 'core'],
 };
 /** Packages of the core: schemas, hashing, shapes; nothing that knows a server or a page. */
-const corePackages = ['zod', '@noble/hashes', 'd3-contour', 'd3-scale', 'd3-scale-chromatic', 'd3-shape'];
+const corePackages = ['zod', '@noble/hashes', 'd3-contour', 'd3-scale', 'd3-scale-chromatic'];
 
 type Import = { from: string; to: string; typeOnly: boolean };
 

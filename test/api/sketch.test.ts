@@ -51,7 +51,7 @@ test('two saves at once – twelve times over – exactly one wins, the other le
       agent.put(sketch(revisionId)).set('If-Match', `"${version}"`).send(tinyBoard(powerW));
     const both = await Promise.all([save(designer, 0.6), save(lead, 0.7)]);
     const lost = both.find(({ status }) => status !== 200);
-    expect(both.map(({ status }) => status).sort()).toEqual([200, 412]);
+    expect(both.map(({ status }) => status).sort((a, b) => a - b)).toEqual([200, 412]);
     expect(lost?.body.current).toMatchObject({
       version: version + 1,
       savedBy: lost === both[0] ? 'hardware-lead' : 'layout-designer',
