@@ -4,8 +4,9 @@ import type { Condition } from '#core/board/condition.ts';
  * Method version: any change in the numbers is a new one, with a line here; stored results keep theirs.
  * 1.0.0 layered cells, package star, films by correlation, multigrid.
  * 1.1.0 moving air: enhanced films, bodies in the stream, air warmed upstream in every rise and in the ladder.
+ * 1.2.0 each land corrected, by a patch of fine cells, for what the board's cells misjudge around it.
  */
-export const methodVersion = '1.1.0';
+export const methodVersion = '1.2.0';
 
 /** Linear solution: ‖b − A·x‖ ÷ ‖b‖ asked of the final solve, and passed only with an energy balance below the limit. */
 export const linearTolerance = 1e-9;
