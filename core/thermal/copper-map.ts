@@ -21,7 +21,7 @@ export type CopperMap = {
 
 const traceNet = '\u0000traces';
 
-/** Paints traces, planes, pours and lands, in this order; later copper of another net keeps its clearance to planes. */
+/** Paints traces, planes, pours and lands, in this order; traces and planes keep their clearance to copper of other nets. */
 export function buildCopperMap(board: Board, grid: CellGrid): CopperMap {
   const columns = grid.columns * grid.split;
   const size = columns * grid.rows * grid.split;
@@ -50,17 +50,14 @@ export function buildCopperMap(board: Board, grid: CellGrid): CopperMap {
       }
     };
     if (layer.traces && layer.traces.coverage > 0) {
+      const barred = clearance(board, grid, inside, index, traceNet);
       const value = full * patternedShare(layer.traces.coverage);
-      for (let row = 0; row < grid.rows * grid.split; row++) paint(row, 0, columns, netNumber(traceNet), value);
+      paintFree(paint, barred, columns, netNumber(traceNet), value);
     }
     if (layer.plane && layer.plane.coverage > 0) {
       const barred = planeBars(board, grid, inside, index, layer.plane.net, layer.plane.insetMm);
       const value = full * patternedShare(layer.plane.coverage);
-      for (let row = 0; row < grid.rows * grid.split; row++) {
-        for (let column = 0; column < columns; column++) {
-          if (!barred[row * columns + column]) paint(row, column, column + 1, netNumber(layer.plane.net), value);
-        }
-      }
+      paintFree(paint, barred, columns, netNumber(layer.plane.net), value);
     }
     for (const pour of board.pours) {
       if (pour.layer !== layer.name || pour.coverage === 0) continue;
@@ -78,12 +75,28 @@ export function buildCopperMap(board: Board, grid: CellGrid): CopperMap {
   return { grid, inside, layers, netNumber };
 }
 
+type Paint = (row: number, from: number, to: number, number: number, value: number) => void;
+
+function paintFree(paint: Paint, barred: Uint8Array, columns: number, number: number, value: number) {
+  for (let at = 0; at < barred.length; at++) {
+    if (!barred[at]) paint(Math.floor(at / columns), at % columns, (at % columns) + 1, number, value);
+  }
+}
+
 /** Sub-cells that a plane must leave: its inset from every edge, and the clearance to copper of other nets on its layer. */
 function planeBars(board: Board, grid: CellGrid, inside: Uint8Array, layer: number, net: string, insetMm: number) {
-  const columns = grid.columns * grid.split;
-  const subMm = Math.max(grid.dxMm, grid.dyMm) / grid.split;
   const outside = inside.map((value) => 1 - value);
-  const edge = growMask(outside, columns, Math.round(insetMm / subMm), true);
+  const bars = clearance(board, grid, inside, layer, net);
+  const edge = growMask(outside, grid.columns * grid.split, Math.round(insetMm / subCellMm(grid)), true);
+  for (let at = 0; at < bars.length; at++) bars[at]! |= edge[at]!;
+  return bars;
+}
+
+const subCellMm = (grid: CellGrid) => Math.max(grid.dxMm, grid.dyMm) / grid.split;
+
+/** Sub-cells within the clearance of pours, lands and vias of other nets on a layer. */
+function clearance(board: Board, grid: CellGrid, inside: Uint8Array, layer: number, net: string): Uint8Array {
+  const columns = grid.columns * grid.split;
   const foreign = new Uint8Array(inside.length);
   const mark = (row: number, from: number, to: number) => foreign.fill(1, row * columns + from, row * columns + to);
   const layerName = board.stackup.copper[layer]!.name;
@@ -114,7 +127,5 @@ function planeBars(board: Board, grid: CellGrid, inside: Uint8Array, layer: numb
       );
     }
   }
-  const bars = growMask(foreign, columns, Math.round(clearanceMm / subMm), false);
-  for (let at = 0; at < bars.length; at++) bars[at]! |= edge[at]!;
-  return bars;
+  return growMask(foreign, columns, Math.round(clearanceMm / subCellMm(grid)), false);
 }

@@ -1,4 +1,5 @@
 import type { CopperMap, LayerCopper } from './copper-map.ts';
+import { clearanceMm } from './materials.ts';
 
 /** In-plane conductances of one copper layer between neighbouring cells, W/K: x faces (columns − 1 used per row) and y faces. */
 export type FaceConductances = { gx: Float64Array; gy: Float64Array };
@@ -7,7 +8,7 @@ export type FaceConductances = { gx: Float64Array; gy: Float64Array };
  * Each face from the fine geometry between the two cell centres, in its own direction: the geometric mean of the lower
  * bound (sub-cells in series along each line, lines in parallel) and the upper bound (across in parallel, then in series).
  * The two are the classical bounds of a resistor network (isothermal against adiabatic cuts); a slot becomes one weak
- * face, a trace conducts along and not across. Where two sub-cells belong to different nets the step between them is laminate.
+ * face, a trace conducts along and not across. Where two sub-cells belong to different nets the step between them is a gap of laminate.
  * @param laminate sheet conductance of the laminate's share, W/K, everywhere on the board
  */
 export function faceConductances(map: CopperMap, layer: LayerCopper, laminate: number): FaceConductances {
@@ -16,25 +17,30 @@ export function faceConductances(map: CopperMap, layer: LayerCopper, laminate: n
   const gy = new Float64Array(columns * rows);
   const subColumns = columns * split;
   const half = split / 2;
+  // A gap is as wide as the clearance, however fine the sub-cells that show it as a mere step are.
+  const gapX = (clearanceMm * split) / dxMm / laminate;
+  const gapY = (clearanceMm * split) / dyMm / laminate;
   for (let j = 0; j < rows; j++) {
     for (let i = 0; i < columns; i++) {
       const start = j * split * subColumns + i * split;
       if (i + 1 < columns) {
-        gx[j * columns + i] = between(map, layer, laminate, start + half, 1, subColumns) * (dyMm / dxMm);
+        gx[j * columns + i] = between(map, layer, laminate, gapX, start + half, 1, subColumns) * (dyMm / dxMm);
       }
       if (j + 1 < rows) {
-        gy[j * columns + i] = between(map, layer, laminate, start + half * subColumns, subColumns, 1) * (dxMm / dyMm);
+        gy[j * columns + i] =
+          between(map, layer, laminate, gapY, start + half * subColumns, subColumns, 1) * (dxMm / dyMm);
       }
     }
   }
   return { gx, gy };
 }
 
-/** Conductance of the split × split sub-cells from `start`, along `along`, as if they were square. */
+/** Conductance of the split × split sub-cells from `start`, along `along`, as if they were square; `gap` is the resistance of a gap one sub-cell long. */
 function between(
   map: CopperMap,
   { net, sheet }: LayerCopper,
   laminate: number,
+  gap: number,
   start: number,
   along: number,
   across: number,
@@ -52,21 +58,24 @@ function between(
         break;
       }
       resistance += 1 / (sheet[at]! + laminate);
-      if (step > 0 && parted(net[at - along]!, net[at]!)) resistance += 1 / laminate;
+      if (parted(net[at - along]!, net[at]!)) resistance += step > 0 ? gap : gap / 2;
     }
+    // A step right at a cell centre belongs half to each side.
+    if (parted(net[at - along]!, net[at]!)) resistance += gap / 2;
     lower += 1 / resistance;
   }
   if (lower === 0) return 0;
-  for (let step = 0; step < n; step++) {
+  for (let step = 0; step <= n; step++) {
     let conductance = 0;
-    let joined = step === 0;
+    let joined = false;
     let at = start + step * along;
     for (let line = 0; line < n; line++, at += across) {
       if (!inside[at]) continue;
       conductance += sheet[at]! + laminate;
       if (!joined && inside[at - along] && !parted(net[at - along]!, net[at]!)) joined = true;
     }
-    upperResistance += 1 / conductance + (joined ? 0 : 1 / (n * laminate));
+    if (step < n) upperResistance += 1 / conductance;
+    if (!joined) upperResistance += (step > 0 && step < n ? gap : gap / 2) / n;
   }
   return Math.sqrt(lower / upperResistance);
 }
