@@ -16,6 +16,7 @@ export default defineConfig({
           root,
           environment: 'node',
           include: ['core/**/*.test.ts', 'cases/**/*.test.ts', 'architecture.test.ts'],
+          testTimeout: 30_000,
         },
       },
       {

@@ -12,9 +12,11 @@ type Given = Pick<BoardDocument, 'outline' | 'stackup'> &
     powerW?: number;
     filmWPerM2K?: number;
     ambientC?: number;
+    /** Still air where left out; else towards +x. */
+    airMPerS?: number;
   };
 
-/** A test board of a publication: one part of known power, 25 °C, lying in still air, all its lands on net T. */
+/** A test board of a publication: one part of known power, 25 °C, lying in still air unless it is moved, all its lands on net T. */
 export function publishedBoard(given: Given): Board {
   const { bodyMm, caseTopKPerW, underBodyKPerW = null, lands, at = [0, 0], powerW = 1 } = given;
   return boardDocument.parse({
@@ -49,7 +51,7 @@ export function publishedBoard(given: Given): Board {
         name: 'published',
         ambientC: given.ambientC ?? 25,
         orientation: 'horizontal',
-        air: { kind: 'still' },
+        air: given.airMPerS ? { kind: 'moving', speedMPerS: given.airMPerS, towardDeg: 0 } : { kind: 'still' },
         filmWPerM2K: given.filmWPerM2K ?? null,
       },
     ],

@@ -140,3 +140,82 @@ test('HTSOP-J8 on one layer – published 153.2 K/W – within 20 %', () => {
 test('HTSOP-J8 with vias to a whole back layer – published 59.2 K/W – within 20 %', () => {
   expect(Math.abs(thetaJa(layers(70)) / 59.2 - 1)).toBeLessThan(0.2);
 });
+
+// TPS73HD3xx data sheet SLVS167C, page 20: HTSSOP PowerPAD, one layer of 1 oz on 5 × 5 in, copper 2 × 2 in, measured:
+// 1/0.0235 K/W in still air, 1/0.0346 K/W at "300", taken as 300 ft/min = 1.52 m/s. Package typical of its outline.
+const powerPad = (airMPerS: number) =>
+  publishedBoard({
+    bodyMm: [6.5, 4.4, 1.1],
+    caseTopKPerW: 30,
+    lands: [
+      { name: 'pad', kind: 'tab', kPerW: 3, pads: [{ at: [0, 0], sizeMm: [3.7, 2.4] }] },
+      {
+        name: 'leads',
+        kind: 'lead',
+        kPerW: 60,
+        pads: [-2.9, 2.9].map((y) => ({ at: [0, y], sizeMm: [6.2, 1.4] })),
+      },
+    ],
+    outline: { points: square(127) },
+    stackup: twoLayers(1.53),
+    pours: [{ id: 'p1', layer: 'L1', net: 'T', points: square(50.8) }],
+    airMPerS,
+  });
+
+test('HTSSOP on 4 in² – published 42.6 K/W still and 28.9 at 1.52 m/s – within 20 %, their ratio within 15 %', () => {
+  const [still, moving] = [thetaJa(powerPad(0)), thetaJa(powerPad(1.52))];
+  expect(Math.abs(still / 42.6 - 1)).toBeLessThan(0.2);
+  expect(Math.abs(moving / 28.9 - 1)).toBeLessThan(0.2);
+  expect(Math.abs(moving / still / (28.9 / 42.6) - 1)).toBeLessThan(0.15);
+});
+
+// TPS7A7001 data sheet SBVS134D, page 3: SO-8 PowerPAD on the JESD51-7 board (76.2 × 114.3 mm, 2 × 70 and 2 × 35 µm),
+// simulated: planes of 3 × 3 in, 5 % copper outside, 3 × 2 vias to the ground plane; 46.4 K/W, θJC top 54.2, bottom 6.8.
+test('SO-8 with pad on the JEDEC four-layer board – published 46.4 K/W – within 15 %', () => {
+  const board = publishedBoard({
+    bodyMm: [3.9, 4.9, 1.5],
+    caseTopKPerW: 54.2,
+    lands: [
+      { name: 'pad', kind: 'tab', kPerW: 6.8, pads: [{ at: [0, 0], sizeMm: [2.3, 2.3] }] },
+      {
+        name: 'leads',
+        kind: 'lead',
+        kPerW: 80,
+        pads: [-1.905, -0.635, 0.635, 1.905].flatMap((y) =>
+          [-2.7, 2.7].map((x) => ({ at: [x, y] as [number, number], sizeMm: [1.55, 0.6] as [number, number] })),
+        ),
+      },
+    ],
+    outline: { points: rectangle(76.2, 114.3) },
+    stackup: {
+      copper: [
+        { name: 'L1', thicknessUm: 70, traces: { coverage: 0.05 } },
+        { name: 'L2', thicknessUm: 35 },
+        { name: 'L3', thicknessUm: 35 },
+        { name: 'L4', thicknessUm: 70, traces: { coverage: 0.05 } },
+      ],
+      dielectric: [fr4(0.3), fr4(0.8), fr4(0.3)],
+      maxOperatingC: 130,
+    },
+    pours: [
+      { id: 'p2', layer: 'L2', net: 'T', points: rectangle(76.2, 76.2) },
+      { id: 'p3', layer: 'L3', net: 'PWR', points: rectangle(76.2, 76.2) },
+    ],
+    viaFields: [
+      {
+        id: 'v1',
+        net: 'T',
+        at: [0, 0],
+        columns: 2,
+        rows: 3,
+        pitchMm: 0.8,
+        drillMm: 0.3,
+        platingUm: 25,
+        filling: 'open',
+        from: 'L1',
+        to: 'L2',
+      },
+    ],
+  });
+  expect(Math.abs(thetaJa(board) / 46.4 - 1)).toBeLessThan(0.15);
+});
