@@ -5,13 +5,13 @@ export type IsothermLabel = { valueC: number; at: Mm };
 
 /**
  * One place for the figure of each isotherm: a point of its longest ring inside the board, as far from the labels placed before as it can be.
- * @param free whether a figure may stand at a point
+ * @param free whether the figure of a line may stand at a point
  * @param otherwise where the figure of a line may stand if no free point is left; nowhere when left out
  * @param apartMm labels closer than this to another are left out
  */
 export function isothermLabels(
   lines: readonly Isotherm[],
-  free: (point: Mm) => boolean,
+  free: (point: Mm, line: Isotherm) => boolean,
   apartMm: number,
   otherwise: (point: Mm, line: Isotherm) => boolean = () => false,
 ): IsothermLabel[] {
@@ -19,7 +19,8 @@ export function isothermLabels(
   for (const line of lines) {
     const ring = longest(line.rings);
     if (!ring) continue;
-    const best = furthest(ring, free, placed) ?? furthest(ring, (point) => otherwise(point, line), placed);
+    const best =
+      furthest(ring, (point) => free(point, line), placed) ?? furthest(ring, (point) => otherwise(point, line), placed);
     if (best && best.gap >= apartMm) placed.push({ valueC: line.valueC, at: best.at });
   }
   return placed;

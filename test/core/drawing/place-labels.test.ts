@@ -32,3 +32,12 @@ test('labels – two boxes on one place – their labels do not overlap', () => 
   );
   expect(Math.abs(a!.y - b!.y)).toBeGreaterThanOrEqual(label.height);
 });
+
+test('labels – no room right beside the box – the label goes further away rather than cover something', () => {
+  const box = { x: 45, y: 45, width: 10, height: 10 };
+  // A frame 10 wide around the box: nothing next to the box is free, and only beyond it does the label clear all.
+  const frame = { x: 35, y: 35, width: 30, height: 30 };
+  const [place] = placeLabels([{ box, ...label }], bounds, [frame, box]);
+  const { x, y } = place!;
+  expect(x + label.width <= 35 || x >= 65 || y + label.height <= 35 || y >= 65).toBe(true);
+});

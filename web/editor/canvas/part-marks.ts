@@ -1,5 +1,5 @@
 import type { ConditionResult } from '#core/result/result.ts';
-import type { PartMark } from './draw-marks.ts';
+import type { PartMark } from './place-plates.ts';
 
 /** What stands beside each regulator: its junction temperature and its verdict in one condition. */
 export function partMarks(condition: ConditionResult | null): ReadonlyMap<string, PartMark> {

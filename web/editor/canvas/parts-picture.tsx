@@ -4,9 +4,10 @@ import { shownBoard } from '../editor-store.ts';
 import { isCurrent } from '../solve/checks.ts';
 import { drawBodies, drawLands } from './draw-board.ts';
 import { drawIsothermLabels } from './draw-heat.ts';
-import { drawMarks, occupiedBy } from './draw-marks.ts';
+import { drawMarks } from './draw-marks.ts';
 import { partMarks } from './part-marks.ts';
 import { PictureLayer } from './picture-layer.tsx';
+import { occupiedBoxes, placePlates } from './place-plates.ts';
 import { activeCheck, useHeatPicture } from './use-heat-picture.ts';
 import { useThemePalette } from './use-theme-palette.ts';
 
@@ -23,8 +24,9 @@ export function PartsPicture() {
       const sheet = { pen, camera, view, palette };
       drawLands(sheet, board, picture !== null);
       drawBodies(sheet, board);
-      if (picture) drawIsothermLabels(sheet, board, picture, occupiedBy(sheet, board));
-      drawMarks(sheet, board, partMarks(check?.condition ?? null), !check || !isCurrent(check, board));
+      const plates = placePlates(sheet, board, partMarks(check?.condition ?? null));
+      if (picture) drawIsothermLabels(sheet, board, picture, occupiedBoxes(sheet, board, plates));
+      drawMarks(sheet, plates, !check || !isCurrent(check, board));
     },
     [board, camera, view, palette, picture, check],
   );

@@ -104,13 +104,37 @@ function screenBox({ camera, view }: Sheet, rings: readonly (readonly Mm[])[]) {
   };
 }
 
+/** Line from a label to what it names, both on the screen. */
+export function drawLeader(sheet: Sheet, [from, to]: readonly [Mm, Mm]): void {
+  const { pen, palette } = sheet;
+  for (const [colour, width] of [
+    [palette.halo, 3.5],
+    [palette.ink, 1],
+  ] as const) {
+    pen.beginPath();
+    pen.moveTo(...from);
+    pen.lineTo(...to);
+    strokePath(sheet, colour, width);
+  }
+}
+
+export function textFont(sizePx: number, bold = false): string {
+  return `${bold ? '600 ' : ''}${sizePx}px 'Source Sans 3', sans-serif`;
+}
+
+/** Width of a text on the screen, px. */
+export function textWidth({ pen }: Sheet, text: string, sizePx: number, bold = false): number {
+  pen.font = textFont(sizePx, bold);
+  return pen.measureText(text).width;
+}
+
 export type TextLook = { sizePx?: number; bold?: boolean; colour?: string; plate?: string; align?: CanvasTextAlign };
 
 /** Text with a plate (or a halo) behind it; `[x, y]` is its middle line on the screen. */
 export function drawText(sheet: Sheet, text: string, [x, y]: Mm, look: TextLook = {}): void {
   const { pen, palette } = sheet;
   const { sizePx = 12, bold = false, colour = palette.ink, plate, align = 'center' } = look;
-  pen.font = `${bold ? '600 ' : ''}${sizePx}px 'Source Sans 3', sans-serif`;
+  pen.font = textFont(sizePx, bold);
   pen.textAlign = align;
   pen.textBaseline = 'middle';
   if (plate) {
