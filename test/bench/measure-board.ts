@@ -36,10 +36,8 @@ export function measureBoard(board: Board): BoardMeasurement {
   if (!condition) throw new Error(`${board.title} has no condition to solve`);
   const points = operatingPoints(board, condition);
   const heat = heatInput(points, sourcePowers(board, condition, points));
-  const before = process.memoryUsage().arrayBuffers;
   const model = buildBoardModel(board);
   const rises = solveRises(model, condition, heat);
-  const buffersMB = (process.memoryUsage().arrayBuffers - before) / 2 ** 20;
   if (rises.status !== 'converged') throw new Error(`${board.title}: ${rises.message}`);
 
   // The model keeps the films of the last round: one fixed matrix for both methods.
@@ -66,7 +64,7 @@ export function measureBoard(board: Board): BoardMeasurement {
     unknowns: b.length,
     buildMs: medianMs(() => buildBoardModel(board)),
     solveMs: medianMs(() => solveRises(model, condition, heat)),
-    buffersMB,
+    buffersMB: bufferBytes([model, rises]) / 2 ** 20,
     linearMs,
     yardstickMs,
     iterations,
@@ -82,4 +80,16 @@ function medianMs(act: () => unknown): number {
     return performance.now() - began;
   });
   return times.sort((a, b) => a - b)[Math.floor(rounds / 2)]!;
+}
+
+/** Bytes of all typed arrays that can be reached from a value, each buffer once. */
+function bufferBytes(value: unknown, seen = new Set<unknown>()): number {
+  if (typeof value !== 'object' || value === null || seen.has(value)) return 0;
+  seen.add(value);
+  if (ArrayBuffer.isView(value)) {
+    if (seen.has(value.buffer)) return 0;
+    seen.add(value.buffer);
+    return value.buffer.byteLength;
+  }
+  return Object.values(value).reduce((sum: number, part) => sum + bufferBytes(part, seen), 0);
 }
