@@ -1,6 +1,8 @@
 import { expect, test } from 'vitest';
 import { boardDocument, type Board, type BoardDocument } from '#core/board/document.ts';
 import { buildBoardModel } from '#core/thermal/board-model.ts';
+import { naturalFilm } from '#core/thermal/natural-convection.ts';
+import { radiationFilm } from '#core/thermal/radiation.ts';
 import { solveCondition } from '#core/thermal/solve-condition.ts';
 import { publishedBoard, rectangle } from '../../cases/board-of.ts';
 
@@ -100,4 +102,51 @@ test('a board – turned by 90° – keeps its temperatures', () => {
   );
   const [one, other] = [heated([80, 50], pair, 100, 10), upright].map((board) => solve(board, { A: 1, B: 0.3 }, 1));
   expect((one!.sources.get('B')!.meanC - 25) / (other!.sources.get('B')!.meanC - 25)).toBeCloseTo(1, 7);
+});
+
+test('a part whose lands hardly conduct – its heat – leaves through case top and film in series', () => {
+  const board = publishedBoard({
+    bodyMm: [6, 5, 2],
+    caseTopKPerW: 35,
+    lands: [{ name: 'lead', kind: 'lead', kPerW: 1e6, pads: [{ at: [0, 0], sizeMm: [1, 1] }] }],
+    outline: { points: rectangle(20, 20) },
+    stackup: {
+      copper: [
+        { name: 'L1', thicknessUm: 35 },
+        { name: 'L2', thicknessUm: 35 },
+      ],
+      dielectric: [{ thicknessMm: 1.6, inPlaneWPerMK: 0.8, throughWPerMK: 0.3 }],
+      maxOperatingC: 130,
+    },
+    filmWPerM2K: 12,
+  });
+  const solution = solveCondition(buildBoardModel(board, { cellMm: 1 }), board.conditions[0]!, {
+    regulatorsW: new Map([['U1', 0.2]]),
+    sourcesW: new Map(),
+  });
+  const heat = solution.regulators.get('U1')!;
+  // Top and four sides: 6·5 + 2·(6 + 5)·2 = 74 mm². Lands and board, 1e6 K/W beside it, take about 0.1 % of the heat.
+  const film = 1 / (12 * 74e-6);
+  expect((heat.junctionC - 25) / (0.2 * (35 + film))).toBeCloseTo(1, 2);
+  expect((heat.caseTopC - 25) / (0.2 * film)).toBeCloseTo(1, 2);
+});
+
+test('uniform heat on one face of a thick poor board in still air – both faces – each have the film of their own temperature', () => {
+  const sources: Sources = [{ ref: 'Q', at: [30, 20], sizeMm: [60, 40], powerW: 1 }];
+  const fixed = heated([60, 40], sources, 0.05, 10);
+  const board = { ...fixed, conditions: fixed.conditions.map((condition) => ({ ...condition, filmWPerM2K: null })) };
+  const solution = solve(board, { Q: 2 }, 2);
+  // The same two films and one slab, by plain repetition: length = area ÷ perimeter = 2400 / 200 mm.
+  const [areaM2, lengthM, slab, ambientK] = [2400e-6, 0.012, 0.05 / 1.6e-3, 298.15];
+  const film = (attitude: 'face-up' | 'face-down', riseK: number) =>
+    naturalFilm(attitude, ambientK, riseK, lengthM, 1) + radiationFilm(0.9, ambientK + riseK, ambientK);
+  let [top, bottom] = [30, 20];
+  for (let round = 0; round < 200; round++) {
+    const below = film('face-down', bottom);
+    top = 2 / areaM2 / (film('face-up', top) + 1 / (1 / below + 1 / slab));
+    bottom = top / (1 + below / slab);
+  }
+  expect(top - bottom).toBeGreaterThan(5);
+  expect(solution.sources.get('Q')!.meanC - 25).toBeCloseTo(top, 1);
+  expect(solution.field.layers[1]!.temperatureC[100]! - 25).toBeCloseTo(bottom, 1);
 });
