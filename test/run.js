@@ -3,6 +3,7 @@ import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { ensureChromium } from './support/chromium.js';
+import { ensureSciPy } from './support/scipy.js';
 import { checkNode, prepareBuild, preparePackages } from '../api/launch/prepare.js';
 import { ensurePostgres } from '../db/cluster/binaries.js';
 
@@ -49,6 +50,7 @@ try {
   checkNode();
   ensurePostgres();
   ensureChromium();
+  ensureSciPy();
   await preparePackages();
   step('types', ['tsc', '-b']);
   step('lint', ['oxlint', '--type-aware', '--deny-warnings', '--quiet']);

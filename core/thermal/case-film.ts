@@ -1,3 +1,4 @@
+import type { AirProperties } from './air-properties.ts';
 import { blendedFilm, plateFilm } from './forced-convection.ts';
 import type { PackageNodes } from './package-star.ts';
 
@@ -6,15 +7,9 @@ import type { PackageNodes } from './package-star.ts';
  * anew at the body and runs over the side of the square of its area. Between Re 500 and 5000 this is within 20 % of
  * Nu = 0.348·Re^0.6 for flat packs on a card (Wirtz and Dykshoorn 1984, from memory), so no further enhancement is taken.
  */
-export function caseFilm(
-  nodes: PackageNodes,
-  natural: number,
-  speedMPerS: number,
-  filmK: number,
-  pressure: number,
-): number {
+export function caseFilm(nodes: PackageNodes, natural: number, speedMPerS: number, air: AirProperties): number {
   if (speedMPerS === 0) return natural;
-  return blendedFilm(natural, plateFilm(speedMPerS, filmK, pressure)(0, nodes.bodySideM));
+  return blendedFilm(natural, plateFilm(speedMPerS, air)(0, nodes.bodySideM));
 }
 
 /** Case top between its resistance and its film, W/K; 0 without a film. */

@@ -1,7 +1,7 @@
 import type { Condition } from '#core/board/condition.ts';
 import { boundsOf, perimeter, polygonArea } from '#core/geometry/polygon.ts';
 import { celsiusOffset } from '#core/units.ts';
-import { pressureRatio } from './air-properties.ts';
+import { airProperties, pressureRatio } from './air-properties.ts';
 import { airReturn, type AirReturn } from './air-return.ts';
 import type { BoardModel } from './board-model.ts';
 import { caseFilm } from './case-film.ts';
@@ -74,9 +74,9 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
     if (fixed !== null) return setFixed(typeof fixed === 'number' ? { top: fixed, bottom: fixed } : fixed);
     for (const { face, offset, attitude, key } of sides) {
       const driving = drivingRise(face, rise, offset, model.layers.count);
-      const natural = naturalFilm(attitude as Attitude, ambientK, driving.rise, length * driving.shrink, pressure);
-      const filmK = ambientK + driving.rise / 2;
-      const plate = moving ? plateFilm(moving.speedMPerS, filmK, pressure) : null;
+      const properties = airProperties(ambientK + driving.rise / 2, pressure);
+      const natural = naturalFilm(attitude as Attitude, properties, driving.rise, length * driving.shrink);
+      const plate = moving ? plateFilm(moving.speedMPerS, properties) : null;
       const { air } = out;
       for (let cell = 0; cell < cells; cell++) {
         let convection = natural;
@@ -97,7 +97,7 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
       model.packages.forEach((nodes, index) => {
         if (nodes.side !== key) return;
         const surfaceK = ambientK + withinRange(caseRise[index]!);
-        const convection = nodes.caseAreaM2 * caseFilm(nodes, natural, moving?.speedMPerS ?? 0, filmK, pressure);
+        const convection = nodes.caseAreaM2 * caseFilm(nodes, natural, moving?.speedMPerS ?? 0, properties);
         out.cases[index] = convection + nodes.caseAreaM2 * radiationFilm(nodes.emissivity, surfaceK, ambientK);
         if (out.air) out.air.caseConvection[index] = convection;
       });

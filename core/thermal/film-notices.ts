@@ -22,7 +22,8 @@ export function filmNotices(model: BoardModel, condition: Condition, { rise, amb
     note('air-range', `Air at ${filmK.toFixed(0)} K is outside the 200 to 600 K of its property formulas.`);
   }
   const air = movingAir(condition);
-  const ra = rayleigh(filmK, pressure, driving.rise, naturalLength(model, condition) * driving.shrink);
+  const properties = airProperties(filmK, pressure);
+  const ra = rayleigh(properties, driving.rise, naturalLength(model, condition) * driving.shrink);
   // Without heat there is no draught, and nothing is taken from the correlation.
   if (!air && driving.rise > 1 && (ra < 1 || ra > 1e10)) {
     note(
@@ -33,7 +34,7 @@ export function filmNotices(model: BoardModel, condition: Condition, { rise, amb
   if (!air) return notices;
   const bounds = boundsOf(model.board.outline.points);
   const length = Math.hypot(bounds.maxX - bounds.minX, bounds.maxY - bounds.minY) * 1e-3;
-  const reynolds = (air.speedMPerS * length) / airProperties(filmK, pressure).viscosity;
+  const reynolds = (air.speedMPerS * length) / properties.viscosity;
   if (reynolds > criticalReynolds) {
     note(
       'reynolds-range',

@@ -1,4 +1,4 @@
-import { airProperties } from './air-properties.ts';
+import type { AirProperties } from './air-properties.ts';
 
 /** Reynolds number from which the boundary layer is taken as turbulent. */
 export const criticalReynolds = 5e5;
@@ -15,9 +15,9 @@ export const boardEnhancement = 1.75;
  * Mean film coefficient of a flat plate in parallel flow between two distances from its leading edge, m; W/(m²·K), uniform heat
  * flux: local Nu = 0.453·Re^½·Pr^⅓ laminar, 0.0308·Re^0.8·Pr^⅓ beyond Re 5e5 (Incropera, 7.2.4; Cengel, 7-2; Pr from 0.6).
  * A board is heated by its parts, not held at one temperature, so the flux form is the fitting one.
+ * @param air at the film temperature
  */
-export function plateFilm(speedMPerS: number, filmK: number, pressure: number): (fromM: number, toM: number) => number {
-  const air = airProperties(filmK, pressure);
+export function plateFilm(speedMPerS: number, air: AirProperties): (fromM: number, toM: number) => number {
   const perMetre = speedMPerS / air.viscosity;
   const critical = criticalReynolds / perMetre;
   const scale = air.conductivity * air.prandtl ** (1 / 3);

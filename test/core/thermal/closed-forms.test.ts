@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
 import { boardDocument, type Board, type BoardDocument } from '#core/board/document.ts';
+import { airProperties } from '#core/thermal/air-properties.ts';
 import { buildBoardModel } from '#core/thermal/board-model.ts';
 import { naturalFilm } from '#core/thermal/natural-convection.ts';
 import { radiationFilm } from '#core/thermal/radiation.ts';
@@ -139,7 +140,8 @@ test('uniform heat on one face of a thick poor board in still air – both faces
   // The same two films and one slab, by plain repetition: length = area ÷ perimeter = 2400 / 200 mm.
   const [areaM2, lengthM, slab, ambientK] = [2400e-6, 0.012, 0.05 / 1.6e-3, 298.15];
   const film = (attitude: 'face-up' | 'face-down', riseK: number) =>
-    naturalFilm(attitude, ambientK, riseK, lengthM, 1) + radiationFilm(0.9, ambientK + riseK, ambientK);
+    naturalFilm(attitude, airProperties(ambientK + riseK / 2, 1), riseK, lengthM) +
+    radiationFilm(0.9, ambientK + riseK, ambientK);
   let [top, bottom] = [30, 20];
   for (let round = 0; round < 200; round++) {
     const below = film('face-down', bottom);
