@@ -8,6 +8,7 @@ import { cellWeights, type CellWeights } from './cell-weights.ts';
 import { buildCopperMap } from './copper-map.ts';
 import { faces, type Face } from './film-areas.ts';
 import { filledShares, gridConductances } from './grid-conductances.ts';
+import { resolvedCells } from './land-correction.ts';
 import { landCorrections } from './land-corrections.ts';
 import { packageStar, type PackageNodes } from './package-star.ts';
 import { viaPairs } from './via-pairs.ts';
@@ -28,6 +29,8 @@ export type BoardModel = {
   filled: Float64Array;
   /** Whether lands are corrected for what the cells misjudge around them. */
   correctLands: boolean;
+  /** Pads at least this wide are resolved by the cells and go uncorrected, mm. */
+  resolvedMm: number;
 };
 
 /** Cells coarser than this are a preview, whose lands go uncorrected unless it is asked for, mm. */
@@ -36,11 +39,12 @@ const coarsestCorrectedMm = 1.1;
 /**
  * @param options.cellMm cell size in mm; chosen from the board when left out
  * @param options.correctLands by default for cells up to 1.1 mm
+ * @param options.resolvedMm by default eight cells; another grid's where two are compared, so that both treat each land alike
  * @throws BoardTooLarge beyond the stated maximum of unknowns
  */
 export function buildBoardModel(
   board: Board,
-  options: { cellMm?: number | undefined; correctLands?: boolean } = {},
+  options: { cellMm?: number | undefined; correctLands?: boolean; resolvedMm?: number } = {},
 ): BoardModel {
   const layers = boardLayers(board);
   const grid = buildCellGrid(board, options.cellMm ?? defaultCellMm(board, layers.count), layers.count);
@@ -53,7 +57,10 @@ export function buildBoardModel(
   const pairs: { a: number; b: number; g: number }[] = viaPairs(board, map, layers);
   const packages: PackageNodes[] = [];
   const correctLands = options.correctLands ?? Math.max(grid.dxMm, grid.dyMm) <= coarsestCorrectedMm;
-  const corrections = correctLands ? landCorrections(board, grid, layers) : new Map<string, Map<string, number>>();
+  const resolvedMm = options.resolvedMm ?? resolvedCells * Math.max(grid.dxMm, grid.dyMm);
+  const corrections = correctLands
+    ? landCorrections(board, grid, layers, resolvedMm)
+    : new Map<string, Map<string, number>>();
   let next = cells * layers.count;
   for (const regulator of board.regulators) {
     const model = board.packages[board.parts[regulator.part]?.package ?? ''];
@@ -98,5 +105,6 @@ export function buildBoardModel(
     bottom,
     filled,
     correctLands,
+    resolvedMm,
   };
 }

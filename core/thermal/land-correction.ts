@@ -12,8 +12,8 @@ import type { PlacedLand } from './land-placement.ts';
 import { solderWPerM2K } from './materials.ts';
 import { viaPairs } from './via-pairs.ts';
 
-/** A pad at least this many cells wide needs no correction. */
-const resolvedCells = 8;
+/** A pad at least this many cells wide is resolved: it needs no correction. */
+export const resolvedCells = 8;
 /** Board around the land that takes part, mm and cells. */
 const marginMm = 2;
 const marginCells = 3;
@@ -26,12 +26,19 @@ const patchFilm = 10;
  * What the cells of a grid misjudge of the spreading right under and around a land, K/W, to be added in series with it: the land's
  * own resistance to a cool rim a few millimetres away, on the board's true geometry in fine cells less that in the grid's cells.
  * The idea is the well index of reservoir simulation (Peaceman, SPE J. 18 (1978) 183). It vanishes as the cells shrink.
+ * @param resolvedMm pads at least this wide go without
  */
-export function landCorrection(board: Board, grid: CellGrid, layers: BoardLayers, land: PlacedLand): number {
+export function landCorrection(
+  board: Board,
+  grid: CellGrid,
+  layers: BoardLayers,
+  land: PlacedLand,
+  resolvedMm: number,
+): number {
   const smallest = Math.min(...land.land.pads.flatMap((pad) => pad.sizeMm));
   const cellMm = Math.max(grid.dxMm, grid.dyMm);
   const factor = Math.min(8, Math.ceil(cellMm / fineMm));
-  if (smallest >= resolvedCells * cellMm || factor < 2) return 0;
+  if (smallest >= resolvedMm || factor < 2) return 0;
   const coarse = patchGrid(grid, land.pads.flat());
   if (coarse === null) return 0;
   const fine: CellGrid = {
@@ -61,10 +68,13 @@ type Rim = { left: boolean; right: boolean; low: boolean; high: boolean };
 function patchGrid(grid: CellGrid, points: [number, number][]): CellGrid | null {
   const { minX, minY, maxX, maxY } = boundsOf(points);
   const [mx, my] = [grid.dxMm, grid.dyMm].map((cell) => Math.max(marginMm, marginCells * cell)) as [number, number];
-  const i0 = Math.max(0, Math.floor((minX - mx - grid.x0Mm) / grid.dxMm));
-  const j0 = Math.max(0, Math.floor((minY - my - grid.y0Mm) / grid.dyMm));
-  const i1 = Math.min(grid.columns, Math.ceil((maxX + mx - grid.x0Mm) / grid.dxMm));
-  const j1 = Math.min(grid.rows, Math.ceil((maxY + my - grid.y0Mm) / grid.dyMm));
+  // A turned land may miss a line of the grid by rounding; that must not take in another row of cells.
+  const below = (cells: number) => Math.floor(cells + 1e-6);
+  const above = (cells: number) => Math.ceil(cells - 1e-6);
+  const i0 = Math.max(0, below((minX - mx - grid.x0Mm) / grid.dxMm));
+  const j0 = Math.max(0, below((minY - my - grid.y0Mm) / grid.dyMm));
+  const i1 = Math.min(grid.columns, above((maxX + mx - grid.x0Mm) / grid.dxMm));
+  const j1 = Math.min(grid.rows, above((maxY + my - grid.y0Mm) / grid.dyMm));
   if (i1 <= i0 || j1 <= j0) return null;
   return {
     ...grid,

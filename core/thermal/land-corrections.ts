@@ -8,14 +8,19 @@ import { placedLands } from './land-placement.ts';
 const mostLands = 300;
 
 /** Corrections of every land, K/W, by part and land name. */
-export function landCorrections(board: Board, grid: CellGrid, layers: BoardLayers): Map<string, Map<string, number>> {
+export function landCorrections(
+  board: Board,
+  grid: CellGrid,
+  layers: BoardLayers,
+  resolvedMm: number,
+): Map<string, Map<string, number>> {
   const placed = board.regulators.map((regulator) => ({ regulator, lands: placedLands(board, regulator) }));
   const count = placed.reduce((sum, { lands }) => sum + lands.length, 0);
   if (count > mostLands) return new Map();
   return new Map(
     placed.map(({ regulator, lands }) => [
       regulator.ref,
-      new Map(lands.map((land) => [land.land.name, landCorrection(board, grid, layers, land)])),
+      new Map(lands.map((land) => [land.land.name, landCorrection(board, grid, layers, land, resolvedMm)])),
     ]),
   );
 }

@@ -6,8 +6,9 @@ import type { Condition } from '#core/board/condition.ts';
  * 1.1.0 moving air: enhanced films, bodies in the stream, air warmed upstream in every rise and in the ladder; lands corrected
  *       for the cells around them; gaps between nets count wherever they fall; grid error from two grids.
  * 1.2.0 each land corrected, by a patch of fine cells, for what the board's cells misjudge around it.
+ * 1.2.1 both grids of the grid error correct the same lands; turned lands meet the cells of unturned ones.
  */
-export const methodVersion = '1.2.0';
+export const methodVersion = '1.2.1';
 
 /** Linear solution: ‖b − A·x‖ ÷ ‖b‖ asked of the final solve, and passed only with an energy balance below the limit. */
 export const linearTolerance = 1e-9;

@@ -93,7 +93,8 @@ const worst = (values: (number | null)[]) =>
 /** Junction rises on cells of twice the size. */
 function coarserJunctions(model: BoardModel, condition: Condition, heat: HeatInput): Map<string, number> {
   const cellMm = 2 * Math.max(model.grid.dxMm, model.grid.dyMm);
-  const coarse = coarserOf.get(model) ?? buildBoardModel(model.board, { cellMm, correctLands: model.correctLands });
+  const { correctLands, resolvedMm } = model;
+  const coarse = coarserOf.get(model) ?? buildBoardModel(model.board, { cellMm, correctLands, resolvedMm });
   coarserOf.set(model, coarse);
   const { rise } = solveRises(coarse, condition, heat);
   return new Map(coarse.packages.map((nodes) => [nodes.ref, rise[nodes.junction]!]));
