@@ -15,7 +15,7 @@ export default defineConfig({
           name: 'core',
           root,
           environment: 'node',
-          include: ['core/**/*.test.ts', 'cases/**/*.test.ts', 'architecture.test.ts'],
+          include: ['core/**/*.test.ts', 'cases/**/*.test.ts', 'properties/**/*.test.ts', 'architecture.test.ts'],
           testTimeout: 30_000,
         },
       },

@@ -8,7 +8,7 @@ const settledK = 0.01;
 
 /**
  * Solves a condition; a shorted regulator that passes its shutdown temperature cycles there, so its power becomes the mean
- * that holds its junction at the threshold (secant steps on the power).
+ * that holds its junction at the threshold (secant steps on the power); none where the air and its neighbours alone pass it.
  * @returns the powers that were changed, and the regulators that cycle in the fault
  */
 export function solveWithShutdown(
@@ -40,7 +40,7 @@ export function solveWithShutdown(
       powers.set(shorted, power);
       const regulatorsW = new Map(heat.regulatorsW).set(shorted, power);
       solution = solveCondition(model, condition, { ...heat, regulatorsW }, { start: solution });
-      if (solution.status !== 'converged') break;
+      if (solution.status !== 'converged' || power === 0) break;
     }
   }
   if (options.gridError && solution.status === 'converged') {

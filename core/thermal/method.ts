@@ -6,7 +6,8 @@ import type { Condition } from '#core/board/condition.ts';
  * 1.1.0 moving air: enhanced films, bodies in the stream, air warmed upstream in every rise and in the ladder; lands corrected
  *       for the cells around them; gaps between nets count wherever they fall; grid error from two grids.
  * 1.2.0 each land corrected, by a patch of fine cells, for what the board's cells misjudge around it.
- * 1.2.1 both grids of the grid error correct the same lands; turned lands meet the cells of unturned ones.
+ * 1.2.1 both grids of the grid error correct the same lands; turned lands meet the cells of unturned ones;
+ *       films that radiation keeps from settling are damped.
  */
 export const methodVersion = '1.2.1';
 

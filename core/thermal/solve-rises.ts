@@ -29,7 +29,9 @@ export type Rises = {
 
 /**
  * Non-linear solution by Picard rounds: films from the present rises, one linear solve, again until nothing moves.
- * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move.
+ * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move. Where a round moves
+ * hardly less than the one before (radiation at rises of many hundred kelvins answers with more than it was given), the films
+ * follow only part of the way from then on.
  */
 export function solveRises(model: BoardModel, condition: Condition, heat: HeatInput, start?: Rises): Rises {
   const { network, multigrid } = model;
@@ -55,8 +57,11 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
 
   let iterations = 0;
   let last = condition.filmWPerM2K !== null;
+  const followed = { rise: rise.slice(), caseRise: caseRise.slice(), share: 1, moved: Infinity };
   for (let round = 0; round < maximumFilmRounds; round++) {
-    films.update(rise, caseRise, out);
+    follow(followed.rise, rise, followed.share);
+    follow(followed.caseRise, caseRise, followed.share);
+    films.update(followed.rise, followed.caseRise, out);
     setAnchors(model, out);
     if (!refreshMultigrid(multigrid)) return record('invalid', 'The network has no path to the air.', iterations, NaN);
     before.set(rise);
@@ -68,19 +73,28 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     for (let k = 0; k < n; k++) moved = Math.max(moved, Math.abs(rise[k]! - before[k]!));
     if (!Number.isFinite(moved))
       return record('invalid', 'The temperatures are not finite.', iterations, linear.residual);
+    if (round > 2 && moved > stalledRatio * followed.moved) followed.share = Math.max(0.25, followed.share / 2);
+    followed.moved = moved;
     out.air?.subtract(rise, before);
     model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
     if (!last) {
-      last = moved <= filmToleranceK;
+      last = moved <= filmToleranceK * followed.share;
       continue;
     }
     if (linear.status !== 'converged')
       return record('not-converged', 'The linear solution did not reach its tolerance.', iterations, linear.residual);
-    if (moved <= 3 * filmToleranceK || condition.filmWPerM2K !== null)
+    if (moved <= 3 * filmToleranceK * followed.share || condition.filmWPerM2K !== null)
       return record('converged', null, iterations, linear.residual);
     last = false;
   }
   return record('not-converged', `The films did not settle in ${maximumFilmRounds} rounds.`, iterations, NaN);
+}
+
+/** A round that moves more than this share of the one before has stalled. */
+const stalledRatio = 0.7;
+
+function follow(behind: Float64Array, ahead: Float64Array, share: number) {
+  for (let k = 0; k < ahead.length; k++) behind[k]! += share * (ahead[k]! - behind[k]!);
 }
 
 /**

@@ -197,6 +197,15 @@ describe('checkBoard – output short – full heat below the shutdown, mean hea
     expect(result.findings.map(({ rule }) => rule)).toContain('shutdown-cycling');
   });
 
+  test('air warmer than the shutdown – no heat of its own is left, and no number is missing', () => {
+    const board = shorted(1, 165);
+    const hot = { ...board, conditions: board.conditions.map((condition) => ({ ...condition, ambientC: 200 })) };
+    const [regulator] = check(hot).conditions[0]!.regulators;
+    expect(regulator!.dissipationW).toBe(0);
+    expect(regulator!.junctionC).toBeGreaterThanOrEqual(200);
+    expect(regulator!.verdict).toBe('over');
+  });
+
   test('0.3 A without a shutdown – the full 4.5 W are solved', () => {
     const [regulator] = check(shorted(0.3, null)).conditions[0]!.regulators;
     expect(regulator!.dissipationW).toBeCloseTo(15 * 0.301, 12);

@@ -37,6 +37,18 @@ test('two far starts – the solution – is one', () => {
   }
 });
 
+test.each([
+  ['40 W in one part', { U1: 40, U2: 0, Q1: 0 }],
+  ['15 W on 6.4 cm²', { U1: 7, U2: 7, Q1: 1 }],
+])('%s, where radiation outruns plain repetition – the films – settle all the same', (_, powers) => {
+  for (const air of [{ kind: 'still' as const }, { kind: 'moving' as const, speedMPerS: 0.4, towardDeg: 205 }]) {
+    const solution = solved(hardBoard(), powers, { air });
+    expect(solution.status).toBe('converged');
+    expect(solution.energy.imbalance).toBeLessThan(1e-6);
+    expect(solution.notices.map(({ code }) => code)).toContain('rise-range');
+  }
+});
+
 test('heat far beyond any part – rounds end – with a record and no number that is not one', () => {
   const solution = solved(hardBoard(), { U1: 500, U2: 500, Q1: 500 });
   expect(['converged', 'not-converged']).toContain(solution.status);
