@@ -29,8 +29,8 @@ export type Rises = {
 
 /**
  * Non-linear solution by Picard rounds: films from the present rises, one linear solve, again until nothing moves.
- * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move. Where a round moves
- * hardly less than the one before (radiation at rises of many hundred kelvins answers with more than it was given), the films
+ * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move. Where a round
+ * takes back most of the one before (radiation at rises of many hundred kelvins answers with more than it was given), the films
  * follow only part of the way from then on.
  */
 export function solveRises(model: BoardModel, condition: Condition, heat: HeatInput, start?: Rises): Rises {
@@ -57,7 +57,7 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
 
   let iterations = 0;
   let last = condition.filmWPerM2K !== null;
-  const followed = { rise: rise.slice(), caseRise: caseRise.slice(), share: 1, moved: Infinity };
+  const followed = { rise: rise.slice(), caseRise: caseRise.slice(), share: 1, move: new Float64Array(n) };
   for (let round = 0; round < maximumFilmRounds; round++) {
     follow(followed.rise, rise, followed.share);
     follow(followed.caseRise, caseRise, followed.share);
@@ -70,11 +70,17 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     if (linear.status === 'breakdown')
       return record('invalid', 'The linear solution broke down.', iterations, linear.residual);
     let moved = 0;
-    for (let k = 0; k < n; k++) moved = Math.max(moved, Math.abs(rise[k]! - before[k]!));
+    let [back, square] = [0, 0];
+    for (let k = 0; k < n; k++) {
+      const move = rise[k]! - before[k]!;
+      moved = Math.max(moved, Math.abs(move));
+      back -= move * followed.move[k]!;
+      square += followed.move[k]! ** 2;
+      followed.move[k] = move;
+    }
+    if (round > 0 && back > swingRatio * square) followed.share = Math.max(leastShare, followed.share / 2);
     if (!Number.isFinite(moved))
       return record('invalid', 'The temperatures are not finite.', iterations, linear.residual);
-    if (round > 2 && moved > stalledRatio * followed.moved) followed.share = Math.max(0.25, followed.share / 2);
-    followed.moved = moved;
     out.air?.subtract(rise, before);
     model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
     if (!last) {
@@ -90,8 +96,9 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
   return record('not-converged', `The films did not settle in ${maximumFilmRounds} rounds.`, iterations, NaN);
 }
 
-/** A round that moves more than this share of the one before has stalled. */
-const stalledRatio = 0.7;
+/** A round that takes back more than this share of the one before swings; films answer at most with the third power of a rise. */
+const swingRatio = 0.7;
+const leastShare = 0.25;
 
 function follow(behind: Float64Array, ahead: Float64Array, share: number) {
   for (let k = 0; k < ahead.length; k++) behind[k]! += share * (ahead[k]! - behind[k]!);
