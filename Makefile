@@ -1,5 +1,5 @@
 .DEFAULT_GOAL := help
-.PHONY: help start dev test check format bench seed migrate rollback backup restore stop clean
+.PHONY: help start dev test check format bench mutants seed migrate rollback backup restore stop clean
 
 help: ## List every target
 	@awk -F ':.*## ' '/^[a-z]+:.*## /{printf "  make %-10s %s\n", $$1, $$2}' Makefile
@@ -21,6 +21,9 @@ format: ## Write the format that check asks for
 
 bench: ## Time, memory and accuracy of the solver, as ratios against a reference in the same run
 	@exec node --import tsx test/bench/run.ts
+
+mutants: ## Plant faults in copies of the project and list which tests catch them (MUTANTS=word for some)
+	@exec node --import tsx test/mutants/run.ts
 
 seed: ## Load the demo team and assemblies into the local database; safe to repeat
 	@exec node api/launch/local.js seed

@@ -13,14 +13,14 @@ export type AirProperties = {
 
 const seaLevelPa = 101325;
 
-/** Standard atmosphere below 11 km (ISO 2533): P = P0·(1 − 6.5e-3·z/288.15)^5.2559. Share of the sea-level pressure. */
+/** Standard atmosphere, −500 m to 11 km (ISO 2533): P = P0·(1 − 6.5e-3·z/288.15)^5.2559. Share of the sea-level pressure. */
 export function pressureRatio(altitudeM: number): number {
   return (1 - (6.5e-3 * altitudeM) / 288.15) ** 5.2559;
 }
 
 /**
  * Sutherland forms for viscosity and conductivity (White, Viscous Fluid Flow, constants from memory), ideal gas, cp 1006 J/(kg·K).
- * Within 2.5 % of the tables of Cengel and Holman from 280 to 440 K. At constant temperature only density follows pressure.
+ * Range 200 to 600 K. Within 2.5 % of the tables of Cengel and Holman from 280 to 440 K. At constant temperature only density follows pressure.
  * @param filmK mean of wall and air, K
  */
 export function airProperties(filmK: number, pressure: number): AirProperties {

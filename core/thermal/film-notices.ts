@@ -7,7 +7,13 @@ import { movingAir, naturalLength } from './film-conductances.ts';
 import { criticalReynolds } from './forced-convection.ts';
 import { rayleigh } from './natural-convection.ts';
 import type { ThermalNotice } from './solution.ts';
+import { leastBodyReynolds } from './case-film.ts';
 import type { Rises } from './solve-rises.ts';
+
+/** Rayleigh number of a lying board up to which the published fits of its lower face agree. */
+const lyingRayleigh = 1e7;
+/** Rise of the air in a box beyond which one temperature for all of it is no longer common practice, K. */
+const warmBoxK = 60;
 
 /** Where a film correlation or a property of air was used outside the range that it is published or checked for. */
 export function filmNotices(model: BoardModel, condition: Condition, { rise, ambientK }: Rises): ThermalNotice[] {
@@ -31,6 +37,18 @@ export function filmNotices(model: BoardModel, condition: Condition, { rise, amb
       `Natural convection at Ra ${ra.toExponential(1)} is outside the range 1 to 1e10 of its formulas.`,
     );
   }
+  if (!air && driving.rise > 1 && condition.orientation === 'horizontal' && ra > lyingRayleigh && ra <= 1e10) {
+    note(
+      'lying-board-range',
+      `At Ra ${ra.toExponential(1)} the published fits for a face that looks down part by a quarter and more; they agree up to 1e7.`,
+    );
+  }
+  if (condition.boxRiseK > warmBoxK) {
+    note(
+      'box-range',
+      `One temperature is taken for all the air of a box that is ${condition.boxRiseK} K above the outside; so warm a box has layers of air.`,
+    );
+  }
   if (!air) return notices;
   const bounds = boundsOf(model.board.outline.points);
   const length = Math.hypot(bounds.maxX - bounds.minX, bounds.maxY - bounds.minY) * 1e-3;
@@ -39,6 +57,13 @@ export function filmNotices(model: BoardModel, condition: Condition, { rise, amb
     note(
       'reynolds-range',
       `Re ${reynolds.toExponential(1)}: the wake of warm parts is that of laminar flow, up to Re 5e5.`,
+    );
+  }
+  const bodies = model.packages.map((nodes) => (air.speedMPerS * nodes.bodySideM) / properties.viscosity);
+  if (Math.min(...bodies) < leastBodyReynolds) {
+    note(
+      'body-range',
+      `Re ${Math.min(...bodies).toFixed(0)} of the smallest body is below ${leastBodyReynolds}: its case is cooled better than shown.`,
     );
   }
   if (air.speedMPerS < 0.3) {

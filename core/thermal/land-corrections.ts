@@ -5,7 +5,7 @@ import { landCorrection } from './land-correction.ts';
 import { placedLands } from './land-placement.ts';
 
 /** A board with more lands than this goes without. */
-const mostLands = 300;
+export const mostCorrectedLands = 300;
 
 /** Corrections of every land, K/W, by part and land name. */
 export function landCorrections(
@@ -16,7 +16,7 @@ export function landCorrections(
 ): Map<string, Map<string, number>> {
   const placed = board.regulators.map((regulator) => ({ regulator, lands: placedLands(board, regulator) }));
   const count = placed.reduce((sum, { lands }) => sum + lands.length, 0);
-  if (count > mostLands) return new Map();
+  if (count > mostCorrectedLands) return new Map();
   return new Map(
     placed.map(({ regulator, lands }) => [
       regulator.ref,

@@ -1,5 +1,6 @@
 import type { Condition } from '#core/board/condition.ts';
 import type { BoardModel } from './board-model.ts';
+import { boardNotices } from './board-notices.ts';
 import { filmNotices } from './film-notices.ts';
 import type { ThermalNotice } from './solution.ts';
 import type { Rises } from './solve-rises.ts';
@@ -21,7 +22,7 @@ export function noticesOf(model: BoardModel, condition: Condition, solved: Rises
       });
     }
   }
-  notices.push(...filmNotices(model, condition, solved));
+  notices.push(...boardNotices(model), ...filmNotices(model, condition, solved));
   const hottest = solved.rise.reduce((most, value) => Math.max(most, value), 0);
   if (hottest > 250) {
     notices.push({

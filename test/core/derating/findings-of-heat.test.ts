@@ -37,8 +37,17 @@ describe('findAll – what only the temperatures show', () => {
       { code: 'source-off-board', ref: 'R1', message: 'off' },
       { code: 'rise-range', ref: null, message: 'far' },
     ];
-    expect(new Set(found(soundBoard(), { notices }))).toEqual(
-      new Set(['stop source-off-board R1', 'note rise-range null']),
-    );
+    expect(found(soundBoard(), { notices })).toEqual(['stop source-off-board R1', 'note rise-range null']);
+  });
+
+  test('a notice of one condition – named with it; of every condition – once, for all', () => {
+    const context = contextOf(soundBoard());
+    const general = { code: 'via-range', ref: 'v1', message: 'long' };
+    const own = { code: 'slow-air', ref: null, message: 'slow' };
+    const conditions = context.conditions.map((one, k) => ({ ...one, notices: k === 0 ? [general, own] : [general] }));
+    expect(findAll({ ...context, conditions }).map(({ rule, condition }) => [rule, condition])).toEqual([
+      ['via-range', null],
+      ['slow-air', 'Hot'],
+    ]);
   });
 });
