@@ -5,7 +5,7 @@ import { findAll } from '#core/derating/find-all.ts';
 import type { CheckedCondition } from '#core/derating/finding-context.ts';
 import { worstVerdict } from '#core/derating/verdict.ts';
 import type { Assumption, CheckResult } from '#core/result/result.ts';
-import { buildBoardModel } from '#core/thermal/board-model.ts';
+import { buildBoardModel, releaseBoardModel } from '#core/thermal/board-model.ts';
 import type { HeatField } from '#core/thermal/heat-field.ts';
 import { methodVersion } from '#core/thermal/method.ts';
 import type { ThermalSolution } from '#core/thermal/solution.ts';
@@ -47,13 +47,17 @@ export function checkBoard(board: Board, assumptions: readonly Assumption[], opt
   const fields = new Map<string, HeatField>();
   const checked: CheckedCondition[] = [];
   let start: ThermalSolution | undefined;
-  for (const condition of chosen) {
-    const { checked: one, solution } = checkCondition(model, condition, { start, gridError, now: options.now });
-    checked.push(one);
-    start = solution;
-    if (solution.status === 'converged') fields.set(condition.name, solution.field);
-    if (options.onProgress?.(checked.length, chosen.length) === false)
-      throw new CheckCancelled('The check was cancelled.');
+  try {
+    for (const condition of chosen) {
+      const { checked: one, solution } = checkCondition(model, condition, { start, gridError, now: options.now });
+      checked.push(one);
+      start = solution;
+      if (solution.status === 'converged') fields.set(condition.name, solution.field);
+      if (options.onProgress?.(checked.length, chosen.length) === false)
+        throw new CheckCancelled('The check was cancelled.');
+    }
+  } finally {
+    releaseBoardModel(model);
   }
   const context = { board, conditions: checked };
   return {

@@ -1,7 +1,7 @@
 import { buildLinks, cellCount, nodeCount, type LayeredNetwork } from './layered-network.ts';
 
-/** Lateral conductances of a coarse network are halved: piecewise constant transfer makes them twice too stiff (over-correction). */
-const overCorrection = 0.5;
+/** Lateral conductances of a coarse network are cut: piecewise constant transfer makes them too stiff (over-correction). */
+export const lateralShare = 0.7;
 
 /** Node of the coarse network that a node of the fine one is merged into; 2 × 2 columns, layers and extra nodes kept. */
 export function coarseNode(fine: LayeredNetwork, coarseColumns: number, coarseCells: number): Int32Array {
@@ -32,8 +32,8 @@ export function coarsen(fine: LayeredNetwork): { network: LayeredNetwork; parent
   for (let n = 0; n < cellCount(fine); n++) {
     const to = parent[n]!;
     gz[to]! += fine.gz[n]!;
-    if (fine.gx[n] && parent[n + layers] !== to) gx[to]! += overCorrection * fine.gx[n]!;
-    if (fine.gy[n] && parent[n + fineSy] !== to) gy[to]! += overCorrection * fine.gy[n]!;
+    if (fine.gx[n] && parent[n + layers] !== to) gx[to]! += lateralShare * fine.gx[n]!;
+    if (fine.gy[n] && parent[n + fineSy] !== to) gy[to]! += lateralShare * fine.gy[n]!;
   }
   const pairs: { a: number; b: number; g: number }[] = [];
   const { start, node, g } = fine.links;

@@ -16,28 +16,6 @@ export function factorLines(network: LayeredNetwork, diagonal: Float64Array, inv
   for (let n = cells; n < diagonal.length; n++) inverse[n] = 1 / diagonal[n]!;
 }
 
-/** One half sweep of red-black line Gauss–Seidel from x = 0: the columns with (i + j) mod 2 = colour alone. */
-export function solveColumns(
-  { columns, rows, layers, gz }: LayeredNetwork,
-  inverse: Float64Array,
-  b: Float64Array,
-  x: Float64Array,
-  colour: 0 | 1,
-) {
-  for (let j = 0; j < rows; j++) {
-    for (let i = (j + colour) & 1; i < columns; i += 2) {
-      const base = (j * columns + i) * layers;
-      let carried = b[base]! * inverse[base]!;
-      x[base] = carried;
-      for (let n = base + 1; n < base + layers; n++) {
-        carried = (b[n]! + gz[n - 1]! * carried) * inverse[n]!;
-        x[n] = carried;
-      }
-      for (let n = base + layers - 2; n >= base; n--) x[n]! += gz[n]! * inverse[n]! * x[n + 1]!;
-    }
-  }
-}
-
 /** One half sweep of red-black line Gauss–Seidel over the columns with (i + j) mod 2 = colour. */
 export function smoothColumns(
   network: LayeredNetwork,

@@ -1,7 +1,7 @@
 import { coarsen } from './coarsen.ts';
 import { factorDense, solveDense } from './dense-cholesky.ts';
 import { conductanceSums, multiply, nodeCount, type LayeredNetwork } from './layered-network.ts';
-import { factorLines, smoothColumns, smoothExtras, solveColumns } from './line-smoother.ts';
+import { factorLines, smoothColumns, smoothExtras } from './line-smoother.ts';
 
 type Level = {
   network: LayeredNetwork;
@@ -15,11 +15,14 @@ type Level = {
   residual: Float64Array;
 };
 
-/** Hierarchy of a network: built once, refreshed when only anchors (films) change. */
+/**
+ * Hierarchy of a network: built once, refreshed when only anchors (films) change. The plain path of `kernel/`, in double precision
+ * and without any packing; what the product solves with is held against it.
+ */
 export type Multigrid = { levels: Level[]; dense: Float64Array };
 
-/** A dense factor of this size costs less than the sweeps of one more level. */
-const coarsestNodes = 120;
+/** Columns of the coarsest level at most. */
+const coarsestColumns = 12;
 
 export function buildMultigrid(network: LayeredNetwork): Multigrid {
   const levels: Level[] = [];
@@ -39,7 +42,7 @@ export function buildMultigrid(network: LayeredNetwork): Multigrid {
       residual: arrays(),
     };
     levels.push(level);
-    if (n - fine.extras <= coarsestNodes || (fine.columns === 1 && fine.rows === 1)) break;
+    if (fine.columns * fine.rows <= coarsestColumns) break;
     const { network: coarse, parent } = coarsen(fine);
     level.parent = parent;
     fine = coarse;
@@ -76,13 +79,15 @@ export function refreshMultigrid({ levels, dense }: Multigrid): boolean {
   return factorDense(dense, n);
 }
 
-/** z = one symmetric V(1,1) cycle on A·z = r, from zero. */
+/** z = one symmetric cycle on A·z = r, from zero. */
 export function applyMultigrid(grid: Multigrid, r: Float64Array, z: Float64Array) {
   grid.levels[0]!.b.set(r);
+  grid.levels[0]!.x.fill(0);
   cycle(grid, 0);
   z.set(grid.levels[0]!.x);
 }
 
+/** Two sweeps, the coarser level (twice from the second level on), two sweeps, from the unknowns as they are. */
 function cycle(grid: Multigrid, depth: number) {
   const level = grid.levels[depth]!;
   const { network, inverse, b, x, parent, residual, diagonal } = level;
@@ -91,17 +96,22 @@ function cycle(grid: Multigrid, depth: number) {
     solveDense(grid.dense, x.length, x);
     return;
   }
-  x.fill(0);
-  solveColumns(network, inverse, b, x, 0);
-  smoothColumns(network, inverse, b, x, 1);
-  smoothExtras(network, inverse, b, x, false);
+  for (let sweep = 0; sweep < 2; sweep++) {
+    smoothColumns(network, inverse, b, x, 0);
+    smoothColumns(network, inverse, b, x, 1);
+    smoothExtras(network, inverse, b, x, false);
+  }
   multiply(network, diagonal, x, residual);
   const next = grid.levels[depth + 1]!;
   next.b.fill(0);
   for (let n = 0; n < x.length; n++) next.b[parent[n]!]! += b[n]! - residual[n]!;
+  next.x.fill(0);
   cycle(grid, depth + 1);
+  if (depth >= 1 && next.parent) cycle(grid, depth + 1);
   for (let n = 0; n < x.length; n++) x[n]! += next.x[parent[n]!]!;
-  smoothExtras(network, inverse, b, x, true);
-  smoothColumns(network, inverse, b, x, 1);
-  smoothColumns(network, inverse, b, x, 0);
+  for (let sweep = 0; sweep < 2; sweep++) {
+    smoothExtras(network, inverse, b, x, true);
+    smoothColumns(network, inverse, b, x, 1);
+    smoothColumns(network, inverse, b, x, 0);
+  }
 }

@@ -1,7 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import { placedRectangle } from '#core/geometry/placed-rectangle.ts';
+import { networkSolver, type NetworkSolver } from '#core/numerics/kernel/network-solver.ts';
 import { buildLinks, type LayeredNetwork } from '#core/numerics/layered-network.ts';
-import { buildMultigrid, type Multigrid } from '#core/numerics/multigrid.ts';
 import { boardLayers, type BoardLayers } from './board-layers.ts';
 import { buildCellGrid, defaultCellMm, type CellGrid } from './cell-grid.ts';
 import { cellWeights, type CellWeights } from './cell-weights.ts';
@@ -19,7 +19,9 @@ export type BoardModel = {
   grid: CellGrid;
   layers: BoardLayers;
   network: LayeredNetwork;
-  multigrid: Multigrid;
+  solver: NetworkSolver;
+  /** The same board on cells of twice the size, once it was asked for; shared by all conditions. */
+  coarser: BoardModel | null;
   packages: PackageNodes[];
   sources: { ref: string; side: 'top' | 'bottom'; weights: CellWeights }[];
   sinks: { id: string; layer: number; conductanceWPerK: number; toC: number | 'ambient'; weights: CellWeights }[];
@@ -97,7 +99,8 @@ export function buildBoardModel(
     grid,
     layers,
     network,
-    multigrid: buildMultigrid(network),
+    solver: networkSolver(network),
+    coarser: null,
     packages,
     sources,
     sinks,
@@ -107,4 +110,10 @@ export function buildBoardModel(
     correctLands,
     resolvedMm,
   };
+}
+
+/** Gives the memory of a model's solver back; the model is of no use afterwards. */
+export function releaseBoardModel(model: BoardModel) {
+  model.solver.release();
+  if (model.coarser) releaseBoardModel(model.coarser);
 }

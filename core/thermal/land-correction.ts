@@ -1,8 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import { boundsOf } from '#core/geometry/polygon.ts';
-import { conjugateGradients, conjugateWork } from '#core/numerics/conjugate-gradients.ts';
-import { buildLinks, multiply, type LayeredNetwork } from '#core/numerics/layered-network.ts';
-import { applyMultigrid, buildMultigrid, refreshMultigrid } from '#core/numerics/multigrid.ts';
+import { networkSolver } from '#core/numerics/kernel/network-solver.ts';
+import { buildLinks, type LayeredNetwork } from '#core/numerics/layered-network.ts';
 import type { BoardLayers } from './board-layers.ts';
 import type { CellGrid } from './cell-grid.ts';
 import { cellWeights } from './cell-weights.ts';
@@ -120,18 +119,11 @@ function ownResistance(board: Board, grid: CellGrid, layers: BoardLayers, land: 
   if (slug) b[cells] = 1;
   else weights.cell.forEach((cell, k) => (b[cell * layers.count + offset] = weights.weight[k]!));
   const x = new Float64Array(b.length);
-  const multigrid = buildMultigrid(network);
-  if (!refreshMultigrid(multigrid)) return NaN;
-  const { diagonal } = multigrid.levels[0]!;
-  conjugateGradients(
-    {
-      multiply: (v, y) => multiply(network, diagonal, v, y),
-      precondition: (r, z) => applyMultigrid(multigrid, r, z),
-    },
-    b,
-    x,
-    { tolerance: patchTolerance, maximumIterations: 100, work: conjugateWork(b.length) },
-  );
+  const solver = networkSolver(network);
+  const sound = solver.refresh();
+  if (sound) solver.solve(b, x, { tolerance: patchTolerance, maximumIterations: 100 });
+  solver.release();
+  if (!sound) return NaN;
   let rise = 0;
   for (let k = 0; k < x.length; k++) rise += b[k]! * x[k]!;
   return rise;

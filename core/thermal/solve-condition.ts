@@ -94,14 +94,10 @@ const worst = (values: (number | null)[]) =>
 function coarserJunctions(model: BoardModel, condition: Condition, heat: HeatInput): Map<string, number> {
   const cellMm = 2 * Math.max(model.grid.dxMm, model.grid.dyMm);
   const { correctLands, resolvedMm } = model;
-  const coarse = coarserOf.get(model) ?? buildBoardModel(model.board, { cellMm, correctLands, resolvedMm });
-  coarserOf.set(model, coarse);
+  const coarse = (model.coarser ??= buildBoardModel(model.board, { cellMm, correctLands, resolvedMm }));
   const { rise } = solveRises(coarse, condition, heat);
   return new Map(coarse.packages.map((nodes) => [nodes.ref, rise[nodes.junction]!]));
 }
-
-/** Coarser model of a model, so that many conditions share it. */
-const coarserOf = new WeakMap<BoardModel, BoardModel>();
 
 function hottestLand(model: BoardModel, { rise }: Rises, index: number): number {
   const { lands, side, junction } = model.packages[index]!;

@@ -1,13 +1,6 @@
 import type { Condition } from '#core/board/condition.ts';
 import { bicgstab } from '#core/numerics/bicgstab.ts';
-import {
-  conjugateGradients,
-  conjugateWork,
-  type ConjugateWork,
-  type IterationRecord,
-} from '#core/numerics/conjugate-gradients.ts';
-import { multiply } from '#core/numerics/layered-network.ts';
-import { applyMultigrid, refreshMultigrid, type Multigrid } from '#core/numerics/multigrid.ts';
+import type { IterationRecord } from '#core/numerics/conjugate-gradients.ts';
 import { celsiusOffset } from '#core/units.ts';
 import type { BoardModel } from './board-model.ts';
 import { caseConductance } from './case-film.ts';
@@ -34,7 +27,7 @@ export type Rises = {
  * follow only part of the way from then on.
  */
 export function solveRises(model: BoardModel, condition: Condition, heat: HeatInput, start?: Rises): Rises {
-  const { network, multigrid } = model;
+  const { network, solver } = model;
   const { films, out } = buildFilms(model, condition);
   const n = network.anchor.length;
   const usable = start && start.rise.length === n;
@@ -63,7 +56,7 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     follow(followed.caseRise, caseRise, followed.share);
     films.update(followed.rise, followed.caseRise, out);
     setAnchors(model, out);
-    if (!refreshMultigrid(multigrid)) return record('invalid', 'The network has no path to the air.', iterations, NaN);
+    if (!solver.refresh()) return record('invalid', 'The network has no path to the air.', iterations, NaN);
     before.set(rise);
     const linear = solveLinear(model, out, b, rise, { reduction: last ? 0 : roundReduction });
     iterations += linear.iterations;
@@ -109,33 +102,20 @@ function follow(behind: Float64Array, ahead: Float64Array, share: number) {
  * conjugate gradients where the network is symmetric, by stabilised bi-conjugate gradients where air carries heat along.
  */
 export function solveLinear(
-  { network, multigrid }: BoardModel,
+  { solver }: BoardModel,
   { air }: FilmConductances,
   b: Float64Array,
   x: Float64Array,
   options: { tolerance?: number; reduction?: number; transposed?: boolean },
 ): IterationRecord {
-  const { diagonal } = multigrid.levels[0]!;
   const limits = { tolerance: linearTolerance, maximumIterations, ...options };
-  const precondition = (r: Float64Array, z: Float64Array) => applyMultigrid(multigrid, r, z);
-  if (!air) {
-    const plain = (v: Float64Array, y: Float64Array) => multiply(network, diagonal, v, y);
-    return conjugateGradients({ multiply: plain, precondition }, b, x, { ...limits, work: workOf(multigrid) });
-  }
+  if (!air) return solver.solve(b, x, limits);
   const carrying = (v: Float64Array, y: Float64Array) => {
-    multiply(network, diagonal, v, y);
+    solver.multiply(v, y);
     if (options.transposed) air.subtractTransposed(v, y);
     else air.subtract(v, y);
   };
-  return bicgstab({ multiply: carrying, precondition }, b, x, limits);
-}
-
-const works = new WeakMap<Multigrid, ConjugateWork>();
-
-function workOf(multigrid: Multigrid): ConjugateWork {
-  const work = works.get(multigrid) ?? conjugateWork(multigrid.levels[0]!.diagonal.length);
-  works.set(multigrid, work);
-  return work;
+  return bicgstab({ multiply: carrying, precondition: solver.precondition }, b, x, limits);
 }
 
 /** Heat at each node, W, with the heat that sinks at a fixed temperature bring. */

@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
 import { checkBoard } from '#core/check/check-board.ts';
 import { verdictOf } from '#core/derating/verdict.ts';
+import { networkSolver } from '#core/numerics/kernel/network-solver.ts';
 import { buildBoardModel } from '#core/thermal/board-model.ts';
 import { solveCondition } from '#core/thermal/solve-condition.ts';
 import { hardBoard } from './hard-board.ts';
@@ -23,6 +24,7 @@ test.each<[string, (model: ReturnType<typeof buildBoardModel>) => void]>([
 ])('%s that is not finite – the solution – ends as no converged one', (_, spoil) => {
   const model = buildBoardModel(hardBoard(), { cellMm: 1 });
   spoil(model);
+  model.solver = networkSolver(model.network);
   const solution = solveCondition(model, model.board.conditions[0]!, {
     regulatorsW: new Map([['U1', 1]]),
     sourcesW: new Map(),
