@@ -10,6 +10,7 @@ import { flowDistances } from './flow-distance.ts';
 import { blendedFilm, boardEnhancement, plateFilm } from './forced-convection.ts';
 import { naturalFilm, type Attitude } from './natural-convection.ts';
 import { radiationFilm } from './radiation.ts';
+import { stillFace, withinRange } from './still-face.ts';
 
 /** Air around a board in one condition, made once; `update` turns present temperatures into film conductances. */
 export type Films = {
@@ -27,11 +28,10 @@ export type FilmConductances = {
   top: Float64Array;
   bottom: Float64Array;
   cases: Float64Array;
+  /** What a face's heat gains per kelvin beyond its film, W/K, in still air; 0 elsewhere. It speeds the rounds, never the answer. */
+  slope: { top: Float64Array; bottom: Float64Array };
   air: AirReturn | null;
 };
-
-/** Radiation is linearised between these rises, so that a wild intermediate field cannot overflow. */
-const withinRange = (rise: number) => Math.max(-150, Math.min(2000, rise));
 
 /** Whether the air moves in a condition: a stopped fan is still air. */
 export function movingAir(condition: Condition) {
@@ -58,6 +58,7 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
     top: new Float64Array(cells),
     bottom: new Float64Array(cells),
     cases: new Float64Array(model.packages.length),
+    slope: { top: new Float64Array(cells), bottom: new Float64Array(cells) },
     air: moving ? airReturn(model, moving.towardDeg) : null,
   };
   const distances = moving ? flowDistances(model.grid, moving.towardDeg) : null;
@@ -78,21 +79,20 @@ export function buildFilms(model: BoardModel, condition: Condition): { films: Fi
       const natural = naturalFilm(attitude as Attitude, properties, driving.rise, length * driving.shrink);
       const plate = moving ? plateFilm(moving.speedMPerS, properties) : null;
       const { air } = out;
-      for (let cell = 0; cell < cells; cell++) {
-        let convection = natural;
-        if (plate && distances && air) {
+      if (!plate || !distances || !air) {
+        const target = { film: out[key], slope: out.slope[key] };
+        stillFace(face, rise, { first: offset, step: model.layers.count }, natural, ambientK, target);
+      } else {
+        for (let cell = 0; cell < cells; cell++) {
           const stream = boardEnhancement * plate(distances.near[cell]!, distances.far[cell]!);
-          convection = blendedFilm(natural, stream);
+          const convection = blendedFilm(natural, stream);
           air.convection[key][cell] = convection;
           air.forced[key][cell] = (stream / convection) ** 3;
+          const area = face.area[cell]!;
+          const surfaceK = ambientK + withinRange(rise[cell * model.layers.count + offset]!);
+          const radiation = radiationFilm(face.emissivity[cell]!, surfaceK, ambientK);
+          out[key][cell] = area === 0 ? 0 : area * (convection + radiation);
         }
-        const area = face.area[cell]!;
-        if (area === 0) {
-          out[key][cell] = 0;
-          continue;
-        }
-        const surfaceK = ambientK + withinRange(rise[cell * model.layers.count + offset]!);
-        out[key][cell] = area * (convection + radiationFilm(face.emissivity[cell]!, surfaceK, ambientK));
       }
       model.packages.forEach((nodes, index) => {
         if (nodes.side !== key) return;

@@ -8,3 +8,8 @@ const sigma = 5.670374419e-8;
 export function radiationFilm(emissivity: number, surfaceK: number, ambientK: number): number {
   return emissivity * sigma * (surfaceK * surfaceK + ambientK * ambientK) * (surfaceK + ambientK);
 }
+
+/** What the film's heat flux gains beyond `radiationFilm` per kelvin of the face, W/(m²·K): 4·ε·σ·Ts³ less the film itself, 0 at least. */
+export function radiationSlope(emissivity: number, surfaceK: number, ambientK: number): number {
+  return Math.max(0, 4 * emissivity * sigma * surfaceK ** 3 - radiationFilm(emissivity, surfaceK, ambientK));
+}

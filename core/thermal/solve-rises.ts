@@ -21,8 +21,9 @@ export type Rises = {
 };
 
 /**
- * Non-linear solution by Picard rounds: films from the present rises, one linear solve, again until nothing moves.
- * The early rounds are solved loosely, the last one to the full tolerance with films that no longer move. Where a round
+ * Non-linear solution in rounds: films from the present rises, one linear solve, again until nothing moves. The early rounds are
+ * solved loosely and follow the films along their tangents (Newton, in still air); the last one has the films themselves, which no
+ * longer move, and the full tolerance. Where a round
  * takes back most of the one before (radiation at rises of many hundred kelvins answers with more than it was given), the films
  * follow only part of the way from then on.
  */
@@ -34,7 +35,8 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
   const rise = usable ? start.rise.slice() : new Float64Array(n);
   const caseRise = usable ? start.caseRise.slice() : new Float64Array(model.packages.length);
   const b = rightSide(model, heat, films.ambientK);
-  const before = new Float64Array(n);
+  const { before, move, right, followedRise } = workOf(model, n);
+  move.fill(0);
   if (!usable) rise.fill(20);
   if (!usable) caseRise.fill(20);
   const record = (status: Rises['status'], message: string | null, iterations: number, residual: number): Rises => ({
@@ -50,15 +52,17 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
 
   let iterations = 0;
   let last = condition.filmWPerM2K !== null;
-  const followed = { rise: rise.slice(), caseRise: caseRise.slice(), share: 1, move: new Float64Array(n) };
+  followedRise.set(rise);
+  const followed = { rise: followedRise, caseRise: caseRise.slice(), share: 1, move };
   for (let round = 0; round < maximumFilmRounds; round++) {
     follow(followed.rise, rise, followed.share);
     follow(followed.caseRise, caseRise, followed.share);
     films.update(followed.rise, followed.caseRise, out);
-    setAnchors(model, out);
+    if (!last) addTangents(model, out, b, rise, right);
+    setAnchors(model, out, !last);
     if (!solver.refresh()) return record('invalid', 'The network has no path to the air.', iterations, NaN);
     before.set(rise);
-    const linear = solveLinear(model, out, b, rise, { reduction: last ? 0 : roundReduction });
+    const linear = solveLinear(model, out, last ? b : right, rise, { reduction: last ? 0 : roundReduction });
     iterations += linear.iterations;
     if (linear.status === 'breakdown')
       return record('invalid', 'The linear solution broke down.', iterations, linear.residual);
@@ -77,7 +81,8 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     out.air?.subtract(rise, before);
     model.packages.forEach((nodes, index) => (caseRise[index] = caseRiseOf(model, out, rise, index)));
     if (!last) {
-      last = moved <= filmToleranceK * followed.share;
+      // Tangents converge by squares: what moved this little will hardly move again, and the last round has a test of its own.
+      last = moved <= (out.air ? 1 : 20) * filmToleranceK * followed.share;
       continue;
     }
     if (linear.status !== 'converged')
@@ -87,6 +92,17 @@ export function solveRises(model: BoardModel, condition: Condition, heat: HeatIn
     last = false;
   }
   return record('not-converged', `The films did not settle in ${maximumFilmRounds} rounds.`, iterations, NaN);
+}
+
+/** Vectors of a solution on the way, kept with their model: touching new memory in every solution costs more than the work in it. */
+type Work = Record<'before' | 'move' | 'right' | 'followedRise', Float64Array>;
+const works = new WeakMap<BoardModel, Work>();
+
+function workOf(model: BoardModel, n: number): Work {
+  const vector = () => new Float64Array(n);
+  const work = works.get(model) ?? { before: vector(), move: vector(), right: vector(), followedRise: vector() };
+  works.set(model, work);
+  return work;
 }
 
 /** A round that takes back more than this share of the one before swings; films answer at most with the third power of a rise. */
@@ -147,13 +163,33 @@ function caseRiseOf(model: BoardModel, films: FilmConductances, rise: Float64Arr
   return rise[nodes.junction]! * (1 - fromAir) + air * fromAir;
 }
 
-function setAnchors(model: BoardModel, films: FilmConductances) {
+/** Right side of a round that follows the films along their tangents from the rises as they are. */
+function addTangents(
+  model: BoardModel,
+  { slope }: FilmConductances,
+  b: Float64Array,
+  rise: Float64Array,
+  right: Float64Array,
+) {
+  right.set(b);
+  const layers = model.layers.count;
+  for (let cell = 0, first = 0; cell < slope.top.length; cell++, first += layers) {
+    const last = first + layers - 1;
+    right[first]! += slope.top[cell]! * rise[first]!;
+    right[last]! += slope.bottom[cell]! * rise[last]!;
+  }
+}
+
+function setAnchors(model: BoardModel, films: FilmConductances, tangents: boolean) {
   const { anchor } = model.network;
   const layers = model.layers.count;
   anchor.fill(0);
   for (let cell = 0; cell < films.top.length; cell++) {
     anchor[cell * layers]! += films.top[cell]!;
     anchor[cell * layers + layers - 1]! += films.bottom[cell]!;
+    if (!tangents) continue;
+    anchor[cell * layers]! += films.slope.top[cell]!;
+    anchor[cell * layers + layers - 1]! += films.slope.bottom[cell]!;
   }
   for (const sink of model.sinks) {
     sink.weights.cell.forEach(
