@@ -25,7 +25,7 @@ kernel: ## Compile the kernel of core/numerics/kernel/assembly into kernel-binar
 bench: ## Time, memory and accuracy of the solver, as ratios against a reference in the same run
 	@exec node --import tsx test/bench/run.ts
 
-mutants: ## Plant faults in copies of the project and list which tests catch them (MUTANTS=word for some)
+mutants: ## Plant faults in copies of the project and list which tests catch them (MUTANTS=pattern for some)
 	@exec node --import tsx test/mutants/run.ts
 
 seed: ## Load the demo team and assemblies into the local database; safe to repeat

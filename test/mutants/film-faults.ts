@@ -1,6 +1,24 @@
 import type { PlantedFault } from './planted-fault.ts';
 
-const tests = ['test/core/thermal'];
+const guards = 'test/core/thermal/guards';
+/** What is known of single formulas, and of boards in air. */
+const tests = [
+  ...['textbook-films', 'film-areas', 'second-method', 'energy-balance', 'limits'].map(
+    (name) => `${guards}/${name}.test.ts`,
+  ),
+  'test/core/thermal/closed-forms.test.ts',
+  'test/core/thermal/invariants.test.ts',
+  'test/core/thermal/moving-air.test.ts',
+];
+/** What is known of the solution as such. */
+const solution = [
+  'energy-balance',
+  'residual',
+  'iterative-error',
+  'films-loop',
+  'superposition',
+  'grid-convergence',
+].map((name) => `${guards}/${name}.test.ts`);
 
 /** Faults of air, radiation, heat and the solution. */
 export const filmFaults: readonly PlantedFault[] = [
@@ -30,7 +48,7 @@ export const filmFaults: readonly PlantedFault[] = [
     file: 'core/thermal/solve-rises.ts',
     from: 'for (const nodes of model.packages) b[nodes.junction]!',
     to: 'for (const nodes of model.packages.slice(1)) b[nodes.junction]!',
-    tests,
+    tests: solution,
   },
   {
     fault: 'the ambient in °C taken for kelvins',
@@ -135,27 +153,27 @@ export const filmFaults: readonly PlantedFault[] = [
     file: 'core/thermal/energy-balance.ts',
     from: 'const difference = Math.abs(into.total - out.total);',
     to: 'const difference = 0 * Math.abs(into.total - out.total);',
-    tests,
+    tests: solution,
   },
   {
     fault: 'the linear solution stopped at a hundredth',
     file: 'core/thermal/method.ts',
     from: 'export const linearTolerance = 1e-9;',
     to: 'export const linearTolerance = 1e-4;',
-    tests,
+    tests: solution,
   },
   {
     fault: 'films taken as settled far too early',
     file: 'core/thermal/method.ts',
     from: 'export const filmToleranceK = 0.003;',
     to: 'export const filmToleranceK = 1;',
-    tests,
+    tests: solution,
   },
   {
     fault: 'the grid error without its safety factor',
     file: 'core/thermal/grid-error.ts',
     from: 'return 3 * near;',
     to: 'return near / 3;',
-    tests,
+    tests: solution,
   },
 ];

@@ -7,7 +7,8 @@ import { runTests, tryFault, type Trial } from './try-fault.ts';
 
 /**
  * `make mutants`: plants faults one at a time in copies of the project, runs the tests that must see them, lists what was caught
- * and by which test. Ends non-zero when less than 95 % were. MUTANTS=word tries only those whose file or fault holds it.
+ * and by which test. Ends non-zero when less than 95 % were. MUTANTS=pattern tries only those whose file or fault
+ * it matches.
  */
 const leastShare = 0.95;
 const root = join(import.meta.dirname, '../..');
@@ -31,8 +32,8 @@ async function work(copy: string, queue: PlantedFault[], done: Trial[]) {
   }
 }
 
-const word = process.env.MUTANTS ?? '';
-const queue = plantedFaults.filter(({ file, fault }) => `${file} ${fault}`.includes(word));
+const wanted = new RegExp(process.env.MUTANTS ?? '');
+const queue = plantedFaults.filter(({ file, fault }) => wanted.test(`${file} ${fault}`));
 const copies = Array.from({ length: Math.max(1, Math.min(4, availableParallelism())) }, copyProject);
 try {
   // A test that is red already would catch everything.

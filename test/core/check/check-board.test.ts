@@ -211,4 +211,44 @@ describe('checkBoard – output short – full heat below the shutdown, mean hea
     expect(regulator!.dissipationW).toBeCloseTo(15 * 0.301, 12);
     expect(regulator).toMatchObject({ shutsDown: false, verdict: 'over' });
   });
+
+  test('0.1 A with a shutdown just below and just above the junction – cycles there, and does not', () => {
+    const [free] = check(shorted(0.1, null)).conditions[0]!.regulators;
+    // Neither twice nor half of it: 2 K away.
+    const [below, above] = [-2, 2].map((by) => {
+      const shutdownC = free!.junctionC! + by;
+      return { shutdownC, found: check(shorted(0.1, shutdownC)).conditions[0]!.regulators[0]! };
+    });
+    expect(below!.found.junctionC).toBeCloseTo(below!.shutdownC, 1);
+    expect(below!.found.dissipationW).toBeLessThan(free!.dissipationW!);
+    expect(below!.found.shutsDown).toBe(true);
+    expect(above!.found).toMatchObject({ dissipationW: free!.dissipationW, shutsDown: false });
+  });
+});
+
+test('checkBoard – θJA in a warm box – is that of the air around the board, not of the air outside', () => {
+  const theta = (boxRiseK: number) => {
+    const board = only((document) => {
+      document.conditions[0]!.filmWPerM2K = 10;
+      document.conditions[0]!.boxRiseK = boxRiseK;
+    });
+    return check(board).conditions[0]!.regulators[0]!.thetaJaKPerW!;
+  };
+  // A fixed film does not know how warm the air is.
+  expect(theta(30)).toBeCloseTo(theta(0), 6);
+});
+
+test('checkBoard – a source a little below its limit – is close, as the model may be off by more; far below – within', () => {
+  const source = (limitC: number | null) => {
+    const board = only((document) => {
+      document.sources![0]!.limitC = limitC;
+    });
+    return check(board).conditions[0]!.sources[0]!;
+  };
+  const { temperatureC } = source(null);
+  // Still air: 13 % of a rise of some 15 K.
+  expect(temperatureC! - 60).toBeGreaterThan(8);
+  expect(source(temperatureC! + 0.5).verdict).toBe('close');
+  expect(source(temperatureC! + 40).verdict).toBe('within');
+  expect(source(temperatureC! - 0.5).verdict).toBe('over');
 });
