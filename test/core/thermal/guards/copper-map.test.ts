@@ -89,6 +89,12 @@ test('vias of a net through a plane of another – each – from pour to pour in
   for (const { g } of pairs) expect(g).toBeCloseTo(barrelConductanceLength(board.viaFields[0]!) / 1.45e-3, 12);
 });
 
+test('vias of one net between pours of another – pairs – none', () => {
+  const given: Board = { ...board, pours: board.pours.map((pour) => ({ ...pour, net: 'OTHER' })), regulators: [] };
+  const layers = boardLayers(given);
+  expect(viaPairs(given, buildCopperMap(given, buildCellGrid(given, 0.5, layers.count)), layers)).toEqual([]);
+});
+
 test('a part – what leaves its junction – is every land, the gap under its body, and nothing else but the case top', () => {
   const { network, packages } = buildBoardModel(board, { cellMm: 0.5, correctLands: false });
   const { links } = network;
