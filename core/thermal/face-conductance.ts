@@ -17,22 +17,51 @@ export function faceConductances(map: CopperMap, layer: LayerCopper, laminate: n
   const gy = new Float64Array(columns * rows);
   const subColumns = columns * split;
   const half = split / 2;
+  const same = uniformCells(map, layer);
+  const alike = (a: number, b: number) => same[a] === same[b] && layer.net[first(a)] === layer.net[first(b)];
+  const first = (cell: number) => Math.floor(cell / columns) * split * subColumns + (cell % columns) * split;
   // A gap is as wide as the clearance, however fine the sub-cells that show it as a mere step are.
   const gapX = (clearanceMm * split) / dxMm / laminate;
   const gapY = (clearanceMm * split) / dyMm / laminate;
   for (let j = 0; j < rows; j++) {
     for (let i = 0; i < columns; i++) {
       const start = j * split * subColumns + i * split;
+      const cell = j * columns + i;
       if (i + 1 < columns) {
-        gx[j * columns + i] = between(map, layer, laminate, gapX, start + half, 1, subColumns) * (dyMm / dxMm);
+        // Most faces lie in plain copper or bare laminate, where the fine geometry has nothing to say.
+        if (alike(cell, cell + 1)) gx[cell] = (same[cell]! + laminate) * (dyMm / dxMm);
+        else gx[cell] = between(map, layer, laminate, gapX, start + half, 1, subColumns) * (dyMm / dxMm);
       }
       if (j + 1 < rows) {
-        gy[j * columns + i] =
-          between(map, layer, laminate, gapY, start + half * subColumns, subColumns, 1) * (dxMm / dyMm);
+        if (alike(cell, cell + columns)) gy[cell] = (same[cell]! + laminate) * (dxMm / dyMm);
+        else gy[cell] = between(map, layer, laminate, gapY, start + half * subColumns, subColumns, 1) * (dxMm / dyMm);
       }
     }
   }
   return { gx, gy };
+}
+
+/** Sheet conductance of the cells that are board, of one net and of one sheet throughout; NaN for the others. */
+function uniformCells({ grid, inside }: CopperMap, { net, sheet }: LayerCopper): Float64Array {
+  const { columns, rows, split } = grid;
+  const subColumns = columns * split;
+  const same = new Float64Array(columns * rows);
+  for (let cell = 0; cell < same.length; cell++) {
+    const start = Math.floor(cell / columns) * split * subColumns + (cell % columns) * split;
+    const [s, n] = [sheet[start]!, net[start]!];
+    let plain = true;
+    for (let line = 0; line < split && plain; line++) {
+      const end = start + line * subColumns + split;
+      for (let at = end - split; at < end; at++) {
+        if (sheet[at] !== s || net[at] !== n || !inside[at]) {
+          plain = false;
+          break;
+        }
+      }
+    }
+    same[cell] = plain ? s : NaN;
+  }
+  return same;
 }
 
 /** Conductance of the split × split sub-cells from `start`, along `along`, as if they were square; `gap` is the resistance of a gap one sub-cell long. */
