@@ -3,7 +3,9 @@ import { loadavg, tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { matrixMarket, vectorMarket } from '#core/numerics/matrix-market.ts';
 import { conductanceSums } from '#core/numerics/layered-network.ts';
+import { dragFrame } from './drag-frame.ts';
 import { hardModel } from './hard-model.ts';
+import { junctionAccuracy, landAccuracy } from './land-accuracy.ts';
 import { linearSpeed, type LinearSpeed } from './linear-speed.ts';
 import { installReference, startReference } from './reference.ts';
 import { worstIterations } from './worst-iterations.ts';
@@ -72,6 +74,27 @@ try {
   }
   const share = speeds[0]!.nonlinearMs / speeds[0]!.oursMs;
   goal('S4 cold solution with films ÷ linear solve', share.toFixed(2), '1.5', share <= 1.5, '1.0');
+  const { frameMs, modelMs } = dragFrame(9);
+  goal(`S5 one frame at 64k, all anew (model ${ms(modelMs)})`, ms(frameMs), '33 ms', frameMs <= 33, '16 ms');
+  if (!quick) {
+    const land = landAccuracy();
+    goal(
+      'S6 isolated land of 1 mm, 16 shifts, cells of 1 mm',
+      `${(100 * land).toFixed(1)} %`,
+      '5 %',
+      land <= 0.05,
+      '1.5 %',
+    );
+    const { rmsK, junctions } = junctionAccuracy(0.73);
+    goal(
+      `S7 rms error of ${junctions} junctions against 0.1 mm`,
+      `${rmsK.toFixed(2)} K`,
+      '0.8 K',
+      rmsK <= 0.8,
+      '0.3 K',
+    );
+  }
+  print('S8 batches of conditions and samples: no batched solution is built yet.');
   if (speeds.length === 3) {
     const peak = process.resourceUsage().maxRSS / 1024;
     goal(
