@@ -86,8 +86,11 @@ test(
           if (!Number.isNaN(t)) expect(other.field.layers[layer]!.temperatureC[cell]! - t).toBeGreaterThan(-1e-4);
         }),
       );
+      // The solver's tolerance is 1e-9 of the whole: also of foil alone, whose parts may be thousands of kelvins too hot.
+      const hottest = Math.max(...[...other.regulators.values()].map(({ junctionC }) => junctionC));
+      const unseen = Math.max(1e-6, 1e-8 * hottest);
       for (const [ref, { junctionC }] of one.regulators) {
-        expect(other.regulators.get(ref)!.junctionC - junctionC).toBeGreaterThan(ref === 'U1' ? 0.1 : -1e-6);
+        expect(other.regulators.get(ref)!.junctionC - junctionC).toBeGreaterThan(ref === 'U1' ? 0.1 : -unseen);
       }
     });
   },
