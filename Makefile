@@ -1,5 +1,5 @@
 .DEFAULT_GOAL := help
-.PHONY: help start dev test check format kernel bench mutants seed migrate rollback backup restore stop clean
+.PHONY: help start dev test check format accuracy kernel bench mutants seed migrate rollback backup restore stop clean
 
 help: ## List every target
 	@awk -F ':.*## ' '/^[a-z]+:.*## /{printf "  make %-10s %s\n", $$1, $$2}' Makefile
@@ -18,6 +18,9 @@ check: ## Types, lint and format
 
 format: ## Write the format that check asks for
 	@npx prettier --write --log-level warn .
+
+accuracy: ## Every published test board against the method, as one table (WRITE=1 keeps it for the product)
+	@exec node --import tsx test/accuracy/run.ts
 
 kernel: ## Compile the kernel of core/numerics/kernel/assembly into kernel-binary.ts
 	@exec node test/support/compile-kernel.js

@@ -1,3 +1,4 @@
+import { modelErrorShare } from '#core/accuracy/model-error.ts';
 import type { Condition } from '#core/board/condition.ts';
 import type { CheckedCondition } from '#core/derating/finding-context.ts';
 import { verdictOf, worstVerdict } from '#core/derating/verdict.ts';
@@ -6,7 +7,6 @@ import { operatingPoints } from '#core/electrical/operating-points.ts';
 import { sourcePowers } from '#core/electrical/source-powers.ts';
 import type { ConditionResult, SourceResult } from '#core/result/result.ts';
 import type { BoardModel } from '#core/thermal/board-model.ts';
-import { modelErrorShareOf } from '#core/thermal/method.ts';
 import type { ThermalSolution } from '#core/thermal/solution.ts';
 import { heatInput } from './heat-input.ts';
 import { regulatorResult } from './regulator-result.ts';
@@ -85,7 +85,7 @@ function sourceResults(
     const verdict =
       source.limitC === null
         ? 'not evaluated'
-        : verdictOf(temperatureC, source.limitC, Math.abs(rise) * modelErrorShareOf(condition));
+        : verdictOf(temperatureC, source.limitC, Math.abs(rise) * modelErrorShare(condition, null));
     return {
       ref: source.ref,
       powerW: powersW.get(source.ref) ?? null,

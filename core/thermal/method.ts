@@ -1,5 +1,3 @@
-import type { Condition } from '#core/board/condition.ts';
-
 /**
  * Method version: any change in the numbers is a new one, with a line here; stored results keep theirs.
  * 1.0.0 layered cells, package star, films by correlation, multigrid.
@@ -8,7 +6,7 @@ import type { Condition } from '#core/board/condition.ts';
  * 1.2.0 each land corrected, by a patch of fine cells, for what the board's cells misjudge around it.
  * 1.2.1 both grids of the grid error correct the same lands; turned lands meet the cells of unturned ones;
  *       films that radiation keeps from settling are damped.
- * 1.3.0 a compiled kernel solves the network: the same equations, other digits behind the tolerance.
+ * 1.3.0 a compiled kernel solves the network: the same equations, other digits behind the tolerance; model error by heat path.
  */
 export const methodVersion = '1.3.0';
 
@@ -21,18 +19,3 @@ export const filmToleranceK = 0.003;
 export const roundReduction = 0.03;
 export const maximumFilmRounds = 60;
 export const maximumIterations = 400;
-
-/**
- * Model error as a share of the rise, one standard deviation, from published boards run by one convention. Still air: 55 cases
- * of 10 families, root mean square 13 % (mean −6 %). Moving air: 4 cases of 2 publications, 12 %, too few to state less than
- * double. Fixed films carry no correlation; what is left is copper, laminate and package.
- */
-const modelErrorShare = { still: 0.13, moving: 0.26, fixed: 0.05 };
-
-/** Share for a condition: fixed films carry no correlation, a stopped fan is still air. */
-export function modelErrorShareOf(condition: Condition): number {
-  if (condition.filmWPerM2K !== null) return modelErrorShare.fixed;
-  return condition.air.kind === 'moving' && condition.fault?.kind !== 'fan-stopped'
-    ? modelErrorShare.moving
-    : modelErrorShare.still;
-}

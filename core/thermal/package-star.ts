@@ -1,3 +1,4 @@
+import { heatPathOf, type HeatPath } from '#core/accuracy/heat-path.ts';
 import type { Board } from '#core/board/document.ts';
 import type { PackageModel } from '#core/board/package.ts';
 import type { Regulator } from '#core/board/placement.ts';
@@ -10,6 +11,7 @@ import { solderWPerM2K } from './materials.ts';
 /** Where a regulator sits in the network: its junction node, its lands on the cells, its case top in the air. */
 export type PackageNodes = {
   ref: string;
+  path: HeatPath;
   junction: number;
   /** `kPerW` from the junction to what the land's cells show; `correctionKPerW` of it lies between the land and its cells. */
   lands: { weights: CellWeights; slug: number | null; layer: number; kPerW: number; correctionKPerW: number }[];
@@ -74,6 +76,7 @@ export function packageStar(
   }
   const nodes: PackageNodes = {
     ref: regulator.ref,
+    path: heatPathOf(model),
     junction,
     lands,
     side: regulator.side,

@@ -1,3 +1,4 @@
+import { modelErrorShare } from '#core/accuracy/model-error.ts';
 import type { Condition } from '#core/board/condition.ts';
 import { celsiusOffset } from '#core/units.ts';
 import { adjointLedger, type Influence, type LedgerEntry } from './adjoint-ledger.ts';
@@ -5,7 +6,7 @@ import { buildBoardModel, type BoardModel } from './board-model.ts';
 import { energyBalance } from './energy-balance.ts';
 import { gridError } from './grid-error.ts';
 import { heatField } from './heat-field-of.ts';
-import { energyLimit, modelErrorShareOf } from './method.ts';
+import { energyLimit } from './method.ts';
 import { noticesOf } from './notices.ts';
 import { probeTemperature } from './probe-temperature.ts';
 import type { HeatInput, RegulatorHeat, ThermalSolution } from './solution.ts';
@@ -33,7 +34,6 @@ export function solveCondition(
       ? adjointLedger(model, heat, solved, earlier?.influences)
       : { ledger: [] as LedgerEntry[], influences: [] };
   const coarser = options.gridError && status === 'converged' ? coarserJunctions(model, condition, heat) : null;
-  const share = modelErrorShareOf(condition);
   const regulators = new Map<string, RegulatorHeat>();
   model.packages.forEach((nodes, index) => {
     const junctionK = solved.rise[nodes.junction]!;
@@ -52,7 +52,7 @@ export function solveCondition(
       boardK: junctionK - preheatedAirK - neighboursK - packageK,
       packageK,
       gridErrorK: coarser ? gridError([junctionK, coarser.get(nodes.ref) ?? NaN]) : null,
-      modelErrorK: share * junctionK,
+      modelErrorK: modelErrorShare(condition, nodes.path) * junctionK,
     });
   });
   const solution: ThermalSolution = {

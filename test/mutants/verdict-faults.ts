@@ -106,8 +106,8 @@ export const verdictFaults: readonly PlantedFault[] = [
   {
     fault: 'a source’s limit without the model’s error',
     file: 'core/check/check-condition.ts',
-    from: 'Math.abs(rise) * modelErrorShareOf(condition)',
-    to: '0 * Math.abs(rise) * modelErrorShareOf(condition)',
+    from: 'Math.abs(rise) * modelErrorShare(condition, null)',
+    to: '0 * Math.abs(rise) * modelErrorShare(condition, null)',
     tests: check,
   },
   {
