@@ -32,7 +32,10 @@ export type EditorState = {
   activeCondition: string | null;
   shown: Shown;
   gridMm: number;
+  /** Places land on the grid. */
   snapping: boolean;
+  /** Places are drawn to lines of other objects. */
+  objectSnapping: boolean;
   /** Why nothing can be changed; null where the sketch may be edited. */
   readOnly: string | null;
   savedBoard: Board;
@@ -65,6 +68,7 @@ export function createEditorStore({ board, version, savedAt, readOnly }: Opening
     shown: 'heat',
     gridMm: 0.5,
     snapping: true,
+    objectSnapping: true,
     readOnly,
     savedBoard: board,
     savedVersion: version,

@@ -13,15 +13,20 @@ import { smallDocument } from '#test/core/board/small-board.ts';
 type Mm = readonly [number, number];
 type Keys = { shift?: boolean; alt?: boolean };
 
-/** The real store with a scripted hand: places are given in mm, 10 px per mm, on a grid of 1 mm. */
-export function driveEditor(readOnly: string | null = null) {
+/** The real store with a scripted hand: places are given in mm, 10 px per mm, on a grid of 1 mm; lines of objects draw where asked for. */
+export function driveEditor(readOnly: string | null = null, objectSnapping = false) {
   const store: EditorStore = createEditorStore({
     board: boardDocument.parse(smallDocument),
     version: 1,
     savedAt: '2026-03-01T10:00:00.000Z',
     readOnly,
   });
-  store.setState({ view: { width: 800, height: 600 }, camera: { centreMm: [20, 15], pxPerMm: 10 }, gridMm: 1 });
+  store.setState({
+    view: { width: 800, height: 600 },
+    camera: { centreMm: [20, 15], pxPerMm: 10 },
+    gridMm: 1,
+    objectSnapping,
+  });
   const keysOf = ({ shift = false, alt = false }: Keys) => ({ shift, alt });
   const input = (at: Mm, keys: Keys) => {
     const state = store.getState();

@@ -44,6 +44,7 @@ function ViewOptions() {
   const activeLayer = useEditor((state) => state.activeLayer);
   const gridMm = useEditor((state) => state.gridMm);
   const snapping = useEditor((state) => state.snapping);
+  const objectSnapping = useEditor((state) => state.objectSnapping);
   const shown = useEditor((state) => state.shown);
   return (
     <div className="flex flex-wrap items-center gap-x-3 gap-y-1">
@@ -68,7 +69,12 @@ function ViewOptions() {
         onChange={(value) => store.setState({ gridMm: Number(value) })}
         options={gridSteps.map((step) => ({ value: String(step), label: `${step} mm` }))}
       />
-      <BarCheck label="Snap" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
+      <BarCheck label="Snap to grid" checked={snapping} onChange={(on) => store.setState({ snapping: on })} />
+      <BarCheck
+        label="Snap to objects"
+        checked={objectSnapping}
+        onChange={(on) => store.setState({ objectSnapping: on })}
+      />
     </div>
   );
 }

@@ -2,6 +2,10 @@ import { useMemo } from 'react';
 import { useEditor } from '../editor-context.ts';
 import { shownBoard } from '../editor-store.ts';
 import { snapped } from '../grid.ts';
+import type { Point } from '#core/board/outline.ts';
+import { snapLines } from '../snap/snap-lines.ts';
+import { snapPoint, snapReachPx } from '../snap/snap-shift.ts';
+import { drawAlignment } from './draw-alignment.ts';
 import type { ToolName, ToolSettings } from '../tools/tool-name.ts';
 import { drawCrosshair, drawGesture, drawGhost, drawSelection } from './draw-overlay.ts';
 import { drawRulers } from './draw-ruler.ts';
@@ -22,18 +26,37 @@ export function HandPicture() {
   const settings = useEditor((state) => state.toolSettings);
   const gridMm = useEditor((state) => state.gridMm);
   const snapping = useEditor((state) => state.snapping);
+  const objectSnapping = useEditor((state) => state.objectSnapping);
   const draw = useMemo(
     () => (pen: CanvasRenderingContext2D) => {
       const sheet = { pen, camera, view, palette };
       drawSelection(sheet, board, selection);
       drawGesture(sheet, gesture);
       const size = ghostSize(tool, settings);
-      const at = crosshair ?? (pointer && snapping ? snapped(pointer, gridMm) : pointer);
+      drawAlignment(sheet, board, gesture);
+      const grid = (point: Point) => (snapping ? snapped(point, gridMm) : point);
+      const settled = (point: Point) =>
+        objectSnapping ? snapPoint(point, snapLines(board, []), snapReachPx / camera.pxPerMm, grid) : grid(point);
+      const at = crosshair ?? (size && pointer ? settled(pointer) : null);
       if (size && at) drawGhost(sheet, at, size);
       if (crosshair) drawCrosshair(sheet, crosshair);
       drawRulers(sheet, crosshair ?? pointer);
     },
-    [board, camera, view, palette, selection, gesture, crosshair, pointer, tool, settings, gridMm, snapping],
+    [
+      board,
+      camera,
+      view,
+      palette,
+      selection,
+      gesture,
+      crosshair,
+      pointer,
+      tool,
+      settings,
+      gridMm,
+      snapping,
+      objectSnapping,
+    ],
   );
   return <PictureLayer draw={draw} />;
 }

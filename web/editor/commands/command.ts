@@ -97,6 +97,13 @@ export const commands = {
     may: always,
     run: (store) => store.setState(({ snapping }) => ({ snapping: !snapping })),
   },
+  objectSnap: {
+    id: 'object-snap',
+    label: 'Snap to objects',
+    keys: ['Shift+G'],
+    may: always,
+    run: (store) => store.setState(({ objectSnapping }) => ({ objectSnapping: !objectSnapping })),
+  },
 } satisfies Record<string, Command>;
 
 export const toolCommands: readonly Command[] = toolNames.map((tool) => ({

@@ -26,10 +26,12 @@ export const idle: Gesture = { phase: 'idle' };
 export type PointerInput = {
   /** Exact place, mm. */
   at: Point;
-  /** Place on the snap grid, or the exact one while Alt suspends snapping, mm. */
+  /** Place on a near line of an object, else on the snap grid; the exact one while Alt suspends snapping, mm. */
   snapped: Point;
-  /** Puts another place on the grid in the same way. */
+  /** Puts another place on the grid, as far as the grid counts now. */
   settle: (at: Point) => Point;
+  /** Distance within which lines of objects draw, mm; null where they do not. */
+  drawnWithinMm: number | null;
   screen: ScreenPoint;
   /** Adds to the selection. */
   shift: boolean;

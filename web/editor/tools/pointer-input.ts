@@ -3,6 +3,8 @@ import { type ScreenPoint, toBoard, toScreen } from '../camera.ts';
 import type { EditorState } from '../editor-store.ts';
 import { snapped } from '../grid.ts';
 import { tidyMm } from '#core/board/edits/tidy-mm.ts';
+import { type SnapLine, snapLines } from '../snap/snap-lines.ts';
+import { snapPoint, snapReachPx } from '../snap/snap-shift.ts';
 import type { PointerInput } from './gesture.ts';
 
 type Keys = { shift: boolean; alt: boolean };
@@ -20,14 +22,26 @@ export function crosshairInput(state: EditorState, at: Point, keys: Keys): Point
   return inputAt(state, at, toScreen(state.camera, state.view, at), true, { ...keys, alt: true });
 }
 
-function inputAt(
-  { camera, gridMm, snapping }: EditorState,
-  at: Point,
-  screen: ScreenPoint,
-  inside: boolean,
-  keys: Keys,
-): PointerInput {
+function inputAt(state: EditorState, at: Point, screen: ScreenPoint, inside: boolean, keys: Keys): PointerInput {
+  const { camera, gridMm, snapping, objectSnapping } = state;
   const exact = ([x, y]: Point): Point => [tidyMm(x), tidyMm(y)];
   const settle = snapping && !keys.alt ? (point: Point) => snapped(point, gridMm) : exact;
-  return { at, snapped: settle(at), settle, screen, shift: keys.shift, pxPerMm: camera.pxPerMm, inside };
+  const drawnWithinMm = objectSnapping && !keys.alt ? snapReachPx / camera.pxPerMm : null;
+  const place = drawnWithinMm === null ? settle(at) : snapPoint(at, linesFor(state), drawnWithinMm, settle);
+  return {
+    at,
+    snapped: place,
+    settle,
+    drawnWithinMm,
+    screen,
+    shift: keys.shift,
+    pxPerMm: camera.pxPerMm,
+    inside,
+  };
+}
+
+/** Lines that draw the point under the hand; a shape whose corner is moved does not draw itself. */
+export function linesFor({ board, gesture }: EditorState): readonly SnapLine[] {
+  const own = gesture.phase === 'moving-corner' || gesture.phase === 'corner-pressed' ? [gesture.key] : [];
+  return snapLines(board, own);
 }

@@ -1,5 +1,6 @@
 import { moveObjects } from '#core/board/edits/move-objects.ts';
 import { moveCorner } from '#core/board/edits/move-corner.ts';
+import type { Board } from '#core/board/document.ts';
 import type { Point } from '#core/board/outline.ts';
 import { type EditorStore, commit } from '../editor-store.ts';
 import { rectangleBetween } from '#core/board/footprint.ts';
@@ -7,6 +8,8 @@ import { tidyMm } from '#core/board/edits/tidy-mm.ts';
 import { cornerAt, objectAt, objectsWithin } from '../hit.ts';
 import { type ObjectKey, objectKeys, objectName } from '#core/board/object-key.ts';
 import { boxOf, positionOf } from '#core/board/object-rings.ts';
+import { linesOf, snapLines } from '../snap/snap-lines.ts';
+import { snapShift } from '../snap/snap-shift.ts';
 import { type Gesture, type PointerInput, idle, movedFar, reachPx } from './gesture.ts';
 import type { Tool } from './tool.ts';
 
@@ -109,18 +112,39 @@ export function pickUp(store: EditorStore): void {
   store.setState({ tool: 'select', gesture: { phase: 'moving', from, by: [0, 0], keys: selection, held: false } });
 }
 
-/** The reference point of what is moved lands on the grid, so that a part lies where its figures are round. */
+/**
+ * Edges, centres and lands of what is moved are drawn to those of other objects; where none is near, its reference
+ * point lands on the grid, so that a part lies where its figures are round.
+ */
 function carry(store: EditorStore, gesture: Extract<Gesture, { phase: 'moving' }>, input: PointerInput): void {
   const { board, live: before } = store.getState();
   const [first] = gesture.keys;
   const home = (first && positionOf(board, first)) ?? gesture.from;
   const exact: Point = [input.at[0] - gesture.from[0], input.at[1] - gesture.from[1]];
   const by = input.settle([home[0] + exact[0], home[1] + exact[1]]);
-  const shift: Point = [tidyMm(by[0] - home[0]), tidyMm(by[1] - home[1])];
+  const [drawnX, drawnY] = drawn(board, gesture.keys, exact, input.drawnWithinMm);
+  const shift: Point = [
+    tidyMm(drawnX === null ? by[0] - home[0] : exact[0] + drawnX),
+    tidyMm(drawnY === null ? by[1] - home[1] : exact[1] + drawnY),
+  ];
   // Within one step of the grid nothing has changed; a new board would be calculated for nothing.
   if (before && shift[0] === gesture.by[0] && shift[1] === gesture.by[1]) return;
   const live = shift[0] === 0 && shift[1] === 0 ? board : moveObjects(board, gesture.keys, shift);
   store.setState({ gesture: { ...gesture, by: shift }, live });
+}
+
+/** What lines of other objects add to a move by the hand, per axis; null where none is near. */
+function drawn(
+  board: Board,
+  keys: readonly ObjectKey[],
+  [dx, dy]: Point,
+  withinMm: number | null,
+): [number | null, number | null] {
+  if (withinMm === null) return [null, null];
+  const moving = keys
+    .flatMap((key) => linesOf(board, key))
+    .map((line) => ({ axis: line.axis, at: line.at + (line.axis === 0 ? dx : dy) }));
+  return snapShift(moving, snapLines(board, keys), withinMm);
 }
 
 function dragCorner(store: EditorStore, key: ObjectKey, index: number, input: PointerInput, held: boolean): void {
