@@ -6,9 +6,33 @@ const pattern = /^([+-]?(?:\d[\d.,]*|[.,]\d+)(?:e[+-]?\d{1,3})?)(.*)$/i;
 
 /**
  * Reads what a person typed into a number field: decimal point or comma, spaces between thousands, a true minus,
- * and a unit of the same kind as the field's ("35um", "1,4 mil", "130 mA").
+ * a unit of the same kind as the field's ("35um", "1,4 mil", "130 mA"), and products and quotients of plain figures
+ * before the unit ("2*3.5", "3 × 0.4in", "25/4 mm").
  */
 export function readQuantity(text: string, unit: string): ReadQuantity {
+  const parts = text.split(/([*×]|\/(?=\s*[\d.,]))/);
+  if (parts.length === 1) return readSingle(text, unit);
+  let product = 1;
+  for (let index = 0; index < parts.length - 1; index += 2) {
+    const factor = readSingle(parts[index] ?? '', '');
+    if ('error' in factor) return { error: `“${text.trim()}” cannot be worked out. ${factor.error}` };
+    product = combined(product, parts[index - 1], factor.value);
+  }
+  // The unit stands at the end; it is read with the last figure and turned into the field's unit once, for the whole.
+  const last = pattern.exec((parts.at(-1) ?? '').trim());
+  const figure = readSingle(last?.[1] ?? '', '');
+  if (!last || 'error' in figure) return { error: `“${text.trim()}” cannot be worked out: a figure is missing.` };
+  const whole = combined(product, parts.at(-2), figure.value);
+  if (!Number.isFinite(whole)) return { error: `“${text.trim()}” is not a number that can be stored.` };
+  // Twelve digits: 3 × 0.1 is to be 0.3.
+  return readSingle(`${Number(whole.toPrecision(12))}${last[2] ?? ''}`, unit);
+}
+
+function combined(before: number, sign: string | undefined, value: number): number {
+  return sign === '/' ? before / value : before * value;
+}
+
+function readSingle(text: string, unit: string): ReadQuantity {
   const trimmed = text
     .trim()
     .replace(/[\u2212\u2013]/g, '-')

@@ -36,7 +36,8 @@ const conversions: Record<string, Record<string, Conversion>> = {
     f: { factor: 5 / 9, offset: -160 / 9 },
     k: { factor: 1, offset: -273.15 },
   },
-  k: { k: { factor: 1 }, mk: { factor: 1e-3 }, c: { factor: 1 } },
+  // A rise of 1 °F is 5/9 K; the 32 °F between the zero points belong to temperatures only.
+  k: { k: { factor: 1 }, mk: { factor: 1e-3 }, c: { factor: 1 }, f: { factor: 5 / 9 } },
   'k/w': scaled({ 'k/w': 1, 'c/w': 1, 'mk/w': 1e-3, 'k/mw': 1e3, 'c/mw': 1e3 }),
   'w/k': scaled({ 'w/k': 1, 'w/c': 1, 'mw/k': 1e-3 }),
   'w/mk': scaled({ 'w/mk': 1 }),

@@ -17,6 +17,21 @@ const read: [string, string, number][] = [
   ['200 ft/min', 'm/s', 1.016],
   ['0.3 W/mK', 'W/(m·K)', 0.3],
   ['1e-3', 'W', 0.001],
+  ['0.4in', 'mm', 10.16],
+  ['12 mil', 'mm', 0.3048],
+  ['200 lfm', 'm/s', 1.016],
+  ['2*3.5', 'mm', 7],
+  ['3 × 0,1', 'mm', 0.3],
+  ['2*0.4in', 'mm', 20.32],
+  ['25/4 mm', 'mm', 6.25],
+  ['10/4*2', 'mm', 5],
+  ['-2*3', 'mm', -6],
+  ['12 mK/W', 'K/W', 0.012],
+  // A rise: 18 °F are 10 K, and 18 °C are 18 K; no zero point is shifted.
+  ['18 °F', 'K', 10],
+  ['18 °C', 'K', 18],
+  // A temperature, worked out before its unit is turned: 2 × 61 °F = 122 °F = 50 °C.
+  ['2*61 °F', '°C', 50],
 ];
 
 test.each(read)('typed quantity – %s in a field of %s – %d', (text, unit, value) => {
@@ -24,7 +39,7 @@ test.each(read)('typed quantity – %s in a field of %s – %d', (text, unit, va
   expect(result).toEqual({ value: expect.closeTo(value, 9) as number });
 });
 
-test.each(['1e400', '--1', 'abc', '1,000', '5 V', '1.2.3,4,5'])(
+test.each(['1e400', '--1', 'abc', '1,000', '5 V', '1.2.3,4,5', '2*', '*3', '1/0', '2 mm*3', '2**3', '1,000*2'])(
   'typed quantity – %s in mm – refused with a reason',
   (text) => {
     const result = readQuantity(text, 'mm');

@@ -1,3 +1,5 @@
+import { type Alignment, alignObjects, alignments } from '#core/board/edits/align-objects.ts';
+import { distributeObjects } from '#core/board/edits/distribute-objects.ts';
 import { moveObjects } from '#core/board/edits/move-objects.ts';
 import { rotateObjects } from '#core/board/edits/rotate-objects.ts';
 import { useState } from 'react';
@@ -7,7 +9,16 @@ import { type ObjectKey, objectName } from '#core/board/object-key.ts';
 import { Group, Wide } from './group.tsx';
 import { useEdit } from './use-edit.ts';
 
-/** Several objects at once: moved and turned together by figures. */
+const alignmentWords: Record<Alignment, string> = {
+  left: 'Left edges',
+  centre: 'Centres, left to right',
+  right: 'Right edges',
+  top: 'Top edges',
+  middle: 'Middles, top to bottom',
+  bottom: 'Bottom edges',
+};
+
+/** Several objects at once: aligned, spread, moved and turned together by figures. */
 export function ManyPanel({ keys }: { keys: readonly ObjectKey[] }) {
   const { edit, disabled } = useEdit();
   const [by, setBy] = useState({ x: 0, y: 0, angle: 90 });
@@ -25,6 +36,46 @@ export function ManyPanel({ keys }: { keys: readonly ObjectKey[] }) {
           {keys.length > 12 ? ` and ${keys.length - 12} more` : ''}
         </p>
       </div>
+      <Group title="Align">
+        <Wide>
+          <div className="flex flex-wrap gap-2">
+            {alignments.map((to) => (
+              <Button
+                key={to}
+                size="small"
+                disabled={disabled}
+                onClick={() => edit(`Align ${what}: ${alignmentWords[to]}`, (board) => alignObjects(board, keys, to))}
+              >
+                {alignmentWords[to]}
+              </Button>
+            ))}
+          </div>
+        </Wide>
+      </Group>
+      <Group title="Distribute with equal gaps">
+        <Wide>
+          {keys.length < 3 ? (
+            <p className="text-sm text-ink-soft">
+              Select three objects or more; the outermost two stay where they are.
+            </p>
+          ) : (
+            <div className="flex flex-wrap gap-2">
+              {(['x', 'y'] as const).map((axis) => (
+                <Button
+                  key={axis}
+                  size="small"
+                  disabled={disabled}
+                  onClick={() =>
+                    edit(`Distribute ${what} along ${axis}`, (board) => distributeObjects(board, keys, axis))
+                  }
+                >
+                  Along {axis}
+                </Button>
+              ))}
+            </div>
+          )}
+        </Wide>
+      </Group>
       <Group title="Move together">
         <QuantityField {...shared} label="By x" value={by.x} onCommit={(x) => x !== null && setBy({ ...by, x })} />
         <QuantityField {...shared} label="By y" value={by.y} onCommit={(y) => y !== null && setBy({ ...by, y })} />
