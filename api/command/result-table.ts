@@ -1,6 +1,7 @@
 import type { Board } from '#core/board/document.ts';
 import { formatNumber } from '#core/format.ts';
 import type { CheckResult, ConditionResult } from '#core/result/result.ts';
+import { railLines } from './rail-lines.ts';
 import { regulatorLines } from './regulator-lines.ts';
 import { textTable } from './text-table.ts';
 
@@ -13,7 +14,7 @@ export function resultTable(board: Board, result: CheckResult): string {
     `method ${result.method}, input ${result.inputHash}`,
     '',
   ];
-  for (const condition of result.conditions) lines.push(...conditionLines(condition), '');
+  for (const condition of result.conditions) lines.push(...conditionLines(board, condition), '');
   lines.push(
     ...section(
       'Findings',
@@ -40,8 +41,10 @@ const place = ({ condition }: { condition: string | null }) => (condition ? `${c
 const section = (heading: string, lines: readonly string[]) =>
   lines.length > 0 ? [heading, ...lines.map((line) => `  ${line}`), ''] : [];
 
-function conditionLines(condition: ConditionResult): string[] {
+function conditionLines(sketch: Board, condition: ConditionResult): string[] {
   const lines = [`${condition.name}: ${condition.verdict}${condition.message ? ` (${condition.message})` : ''}`];
+  const stated = sketch.conditions.find(({ name }) => name === condition.name);
+  if (stated) lines.push(...railLines(sketch, stated));
   lines.push(...regulatorLines(condition));
   if (condition.sources.length > 0) {
     lines.push(

@@ -5,6 +5,8 @@ export type OperatingPoint = {
   feedV: number | null;
   /** At the pin, after the dropper: the highest input of the condition. */
   inputV: number | null;
+  /** At the pin with the lowest supply and the lowest output of what feeds it, never below 0 V. */
+  lowestInputV: number | null;
   /** The lowest output within the tolerance, or what is left of the input in dropout. */
   outputV: number | null;
   outputA: number | null;

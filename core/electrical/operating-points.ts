@@ -42,6 +42,7 @@ function operate(
     ref: regulator.ref,
     feedV: feed.heatV,
     inputV: null,
+    lowestInputV: null,
     outputV: null,
     outputA: currents?.outputA ?? null,
     groundA: currents?.groundA ?? null,
@@ -78,6 +79,7 @@ function operate(
     point: {
       ...blank,
       inputV,
+      lowestInputV: lowInputV === null ? null : Math.max(0, lowInputV),
       outputV,
       outputA,
       groundA,
