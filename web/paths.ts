@@ -22,6 +22,7 @@ export const paths = {
   review: revision('review'),
   record: revision('record'),
   library: (search?: Search) => withSearch('/library', search),
+  method: () => '/method',
   team: () => '/team',
   audit: (search?: Search) => withSearch('/audit', search),
   mail: (search?: Search) => withSearch('/mail', search),

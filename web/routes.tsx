@@ -43,6 +43,7 @@ export const routes: RouteObject[] = [
             children: [{ index: true, element: <Navigate to="sketch" replace /> }, ...revisionPages],
           },
           { path: '/library', lazy: () => import('./library/library-page.tsx') },
+          { path: '/method', lazy: () => import('./method/method-page.tsx') },
           { path: '/team', lazy: () => import('./team/team-page.tsx') },
           { path: '/audit', lazy: () => import('./audit/audit-page.tsx') },
           { path: '/mail', lazy: () => import('./mail/mail-page.tsx') },

@@ -27,6 +27,7 @@ test.each(['light', 'dark'] as const)(
     const places = [
       '/assemblies',
       '/library',
+      '/method',
       '/team',
       ...['sketch', 'conditions', 'results', 'review', 'record'].map((view) => `/revisions/${revision}/${view}`),
     ];

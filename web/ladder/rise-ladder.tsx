@@ -1,3 +1,4 @@
+import { uncertaintyWords } from '#core/result/uncertainty-words.ts';
 import type { RegulatorResult } from '#core/result/result.ts';
 import { formatChange, formatQuantity } from '#core/format.ts';
 import { labelHeights } from './label-heights.ts';
@@ -99,7 +100,7 @@ export function RiseLadder({ regulator, ambientC, limitC }: Props) {
             </li>
           ))}
         </ol>
-        Junction {formatQuantity(junctionC, '°C')} ± {formatQuantity(uncertaintyK, 'K')}
+        Junction {formatQuantity(junctionC, '°C')} ± {formatQuantity(uncertaintyK, 'K')} ({uncertaintyWords(regulator)})
         {limitC === null ? '' : `, limit ${formatQuantity(limitC, '°C')}`}
       </figcaption>
     </figure>

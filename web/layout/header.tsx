@@ -30,6 +30,7 @@ export function Header({ session }: { session: SessionView }) {
   const pages = [
     { to: paths.assemblies(), label: 'Assemblies', shown: true, also: '/revisions/' },
     { to: paths.library(), label: 'Library', shown: true },
+    { to: paths.method(), label: 'Method', shown: true },
     { to: paths.team(), label: 'Team', shown: true },
     { to: paths.audit(), label: 'Audit', shown: session.allowed.includes('read-audit') },
     { to: paths.mail(), label: 'Mail', shown: session.allowed.includes('read-mail') },

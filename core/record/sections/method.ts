@@ -1,3 +1,5 @@
+import { formatNumber } from '#core/format.ts';
+import { uncertaintyWords } from '#core/result/uncertainty-words.ts';
 import { deference, notCovered } from '../method-limits.ts';
 import type { RecordSection } from '../record-document.ts';
 import type { RecordInput } from '../record-input.ts';
@@ -16,12 +18,30 @@ export function methodSection({ result }: RecordInput): RecordSection {
         kind: 'text',
         text: `The band (±) of a junction combines the grid error with the model error, one standard deviation each. The model error is the share of the rise by which published test boards are missed: ${modelErrors(result)} in the conditions of this record. “Close” means inside the limit, but by no more than this band.`,
       },
+      { kind: 'heading', text: 'Which error dominates the widest band of each part' },
+      { kind: 'list', items: widestBands(result) },
       { kind: 'heading', text: 'What the calculation does not cover' },
       { kind: 'list', items: notCovered },
       { kind: 'heading', text: 'What takes precedence' },
       ...deference.map((text) => ({ kind: 'text' as const, text })),
     ],
   };
+}
+
+/** One line for each regulator: its widest band, where, and which error it is made of. */
+function widestBands(result: RecordInput['result']): string[] {
+  const widest = new Map<string, { bandK: number; line: string }>();
+  for (const { name, regulators } of result.conditions) {
+    for (const regulator of regulators) {
+      const { ref, uncertaintyK: bandK } = regulator;
+      if (bandK === null || bandK <= (widest.get(ref)?.bandK ?? -1)) continue;
+      widest.set(ref, {
+        bandK,
+        line: `${ref}, ${name}: ± ${formatNumber(bandK, 1)} K, ${uncertaintyWords(regulator)}.`,
+      });
+    }
+  }
+  return widest.size > 0 ? [...widest.values()].map(({ line }) => line) : ['No junction was evaluated.'];
 }
 
 /** Shares as they were used, read back from the result: later versions of the method may use others. */

@@ -1,3 +1,4 @@
+import { uncertaintyWords } from '#core/result/uncertainty-words.ts';
 import { formatChange, formatQuantity } from '#core/format.ts';
 import { VerdictMark } from '#web/ui/verdict-mark.tsx';
 import { activeCheck } from '../canvas/use-heat-picture.ts';
@@ -17,7 +18,9 @@ export function RegulatorResultLines({ regulatorRef }: { regulatorRef: string })
       <p className="flex flex-wrap items-baseline gap-x-3">
         <span className="text-xl font-semibold">{formatQuantity(result.junctionC, '°C')}</span>
         {result.uncertaintyK === null ? null : (
-          <span className="text-sm text-ink-soft">± {formatQuantity(result.uncertaintyK, 'K')}</span>
+          <span className="text-sm text-ink-soft">
+            ± {formatQuantity(result.uncertaintyK, 'K')}, {uncertaintyWords(result)}
+          </span>
         )}
         <VerdictMark verdict={result.verdict} />
         {isCurrent(check, board) ? null : <span className="text-sm text-ink-soft">preview</span>}
