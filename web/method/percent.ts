@@ -1,2 +1,2 @@
-/** A share as per cent with one decimal and a true minus sign. */
-export const percent = (share: number) => `${share < 0 ? '−' : ''}${Math.abs(100 * share).toFixed(1)} %`;
+/** A share as per cent with one decimal, a true minus sign and no break before the unit. */
+export const percent = (share: number) => `${share < 0 ? '−' : ''}${Math.abs(100 * share).toFixed(1)}\u00a0%`;
