@@ -13,6 +13,7 @@ const canvasKeys = [
   { label: 'One level out: gesture, tool, selection', keys: ['Escape'] },
   { label: 'Suspend snapping while dragging', keys: ['Alt'] },
   { label: 'Move the picture', keys: ['Space+drag', 'Middle button'] },
+  { label: 'Copy and paste objects, also between boards', keys: ['Ctrl+C', 'Ctrl+V'] },
   { label: 'This list', keys: ['?'] },
 ];
 

@@ -5,6 +5,7 @@ import { BoardCanvas } from '../canvas/board-canvas.tsx';
 import { CanvasFooter } from '../canvas/canvas-footer.tsx';
 import { ZoomCorner } from '../canvas/zoom-corner.tsx';
 import { KeysDialog } from '../commands/keys-dialog.tsx';
+import { useClipboard } from '../commands/use-clipboard.ts';
 import { useShortcuts } from '../commands/use-shortcuts.ts';
 import { EditorContext } from '../editor-context.ts';
 import { createEditorStore } from '../editor-store.ts';
@@ -37,6 +38,7 @@ export function Editor({ revision, sketch, userId }: Props) {
   useSolving(store);
   useSearchSync(store);
   useShortcuts(store, () => showKeys(true));
+  useClipboard(store);
   return (
     <EditorContext value={store}>
       <div className="flex min-h-0 min-w-0 flex-1 flex-col">
