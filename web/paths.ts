@@ -1,5 +1,5 @@
 /** Every address inside the application is built here. */
-type RevisionView = 'sketch' | 'conditions' | 'results' | 'review' | 'record';
+type RevisionView = 'sketch' | 'conditions' | 'rails' | 'results' | 'review' | 'record';
 type Search = Record<string, string | null | undefined>;
 
 function withSearch(path: string, search: Search = {}): string {
@@ -18,6 +18,7 @@ export const paths = {
   assembly: (assemblyId: string) => `/assemblies/${assemblyId}`,
   sketch: revision('sketch'),
   conditions: revision('conditions'),
+  rails: revision('rails'),
   results: revision('results'),
   review: revision('review'),
   record: revision('record'),

@@ -9,6 +9,7 @@ import { Loading } from './ui/loading.tsx';
 const revisionPages: RouteObject[] = [
   { path: 'sketch', handle: { fill: true }, lazy: () => import('./editor/sketch-page.tsx') },
   { path: 'conditions', lazy: () => import('./conditions/conditions-page.tsx') },
+  { path: 'rails', lazy: () => import('./rails/rails-page.tsx') },
   { path: 'results', lazy: () => import('./results/results-page.tsx') },
   { path: 'review', lazy: () => import('./review/review-page.tsx') },
   { path: 'record', lazy: () => import('./record/record-page.tsx') },

@@ -81,10 +81,13 @@ function nominalInput(
   outputs: ReadonlyMap<string, number | null>,
 ): number | null {
   if (!feed || inputA === null) return null;
-  const feedV =
-    'regulator' in feed
-      ? outputs.get(feed.regulator)
-      : (condition.supplies[feed.supply] ?? board.supplies.find(({ name }) => name === feed.supply)?.nominalV);
+  let feedV: number | null | undefined;
+  if ('regulator' in feed) feedV = outputs.get(feed.regulator);
+  else {
+    const supply = board.supplies.find(({ name }) => name === feed.supply);
+    // A condition that holds its supply high leaves the nominal as it is; one that holds it lower takes it down.
+    feedV = supply && Math.min(supply.nominalV, condition.supplies[supply.name] ?? supply.nominalV);
+  }
   if (feedV === undefined || feedV === null) return null;
   return Math.max(0, feedV - (dropper?.dropV ?? 0) - (dropper?.resistanceOhm ?? 0) * inputA);
 }

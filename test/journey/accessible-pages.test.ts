@@ -29,7 +29,9 @@ test.each(['light', 'dark'] as const)(
       '/library',
       '/method',
       '/team',
-      ...['sketch', 'conditions', 'results', 'review', 'record'].map((view) => `/revisions/${revision}/${view}`),
+      ...['sketch', 'conditions', 'rails', 'results', 'review', 'record'].map(
+        (view) => `/revisions/${revision}/${view}`,
+      ),
     ];
     for (const place of places) {
       await page.goto(place);

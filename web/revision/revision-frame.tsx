@@ -14,12 +14,13 @@ import { resultQuery, revisionQuery } from './revision-queries.ts';
 const views = [
   { view: 'sketch', label: 'Sketch' },
   { view: 'conditions', label: 'Conditions' },
+  { view: 'rails', label: 'Rails' },
   { view: 'results', label: 'Results' },
   { view: 'review', label: 'Review' },
   { view: 'record', label: 'Record' },
 ] as const;
 
-/** Frame of the five pages of a revision; hands the revision down (`useRevision`). */
+/** Frame of the six pages of a revision; hands the revision down (`useRevision`). */
 export function Component() {
   const { revisionId = '' } = useParams();
   const { pathname, search } = useLocation();

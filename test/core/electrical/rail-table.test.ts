@@ -45,6 +45,11 @@ describe('railTable – both corners in one row', () => {
     expect(rail.state).toBe('regulates');
   });
 
+  test('a condition at the supply’s maximum – nominal stays nominal', () => {
+    const rail = railOf({ ...story, condition: { ...story.condition, supplies: { VIN: 14.8 } } });
+    expect(rail.inputV).toEqual({ lowest: 10.5, nominal: 12, highest: 14.8 });
+  });
+
   test('47 Ω – starves: at the lowest input the output is 3.752 − 0.9 V', () => {
     const rail = railOf({ ...story, regulator: { dropper: { resistanceOhm: 47, dropV: 0.45 } } });
     expect(rail.state).toBe('starves');
