@@ -1,3 +1,5 @@
+import { Link } from 'react-router-dom';
+import { paths } from '#web/paths.ts';
 import { uncertaintyWords } from '#core/result/uncertainty-words.ts';
 import type { RegulatorResult } from '#core/result/result.ts';
 import { formatChange, formatQuantity } from '#core/format.ts';
@@ -100,8 +102,11 @@ export function RiseLadder({ regulator, ambientC, limitC }: Props) {
             </li>
           ))}
         </ol>
-        Junction {formatQuantity(junctionC, '°C')} ± {formatQuantity(uncertaintyK, 'K')} ({uncertaintyWords(regulator)})
-        {limitC === null ? '' : `, limit ${formatQuantity(limitC, '°C')}`}
+        Junction {formatQuantity(junctionC, '°C')} ± {formatQuantity(uncertaintyK, 'K')} (
+        <Link to={paths.method()} className="underline underline-offset-4 hover:text-copper">
+          {uncertaintyWords(regulator)}
+        </Link>
+        ){limitC === null ? '' : `, limit ${formatQuantity(limitC, '°C')}`}
       </figcaption>
     </figure>
   );

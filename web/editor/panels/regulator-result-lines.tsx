@@ -1,3 +1,5 @@
+import { Link } from 'react-router-dom';
+import { paths } from '#web/paths.ts';
 import { uncertaintyWords } from '#core/result/uncertainty-words.ts';
 import { formatChange, formatQuantity } from '#core/format.ts';
 import { VerdictMark } from '#web/ui/verdict-mark.tsx';
@@ -19,7 +21,10 @@ export function RegulatorResultLines({ regulatorRef }: { regulatorRef: string })
         <span className="text-xl font-semibold">{formatQuantity(result.junctionC, '°C')}</span>
         {result.uncertaintyK === null ? null : (
           <span className="text-sm text-ink-soft">
-            ± {formatQuantity(result.uncertaintyK, 'K')}, {uncertaintyWords(result)}
+            ± {formatQuantity(result.uncertaintyK, 'K')},{' '}
+            <Link to={paths.method()} className="underline underline-offset-4 hover:text-copper">
+              {uncertaintyWords(result)}
+            </Link>
           </span>
         )}
         <VerdictMark verdict={result.verdict} />
