@@ -34,6 +34,17 @@ describe('operatingPoints – printed worked examples – their numbers', () => 
     expect(at(6.3)).toBeGreaterThan(allowedW);
   });
 
+  // LX8415 data sheet, page 6, worked example: 5.0 V + 5 % in, 2.5 V − 3 % out, 0.5 A, ground current left
+  // out: 1.41 W. By hand (5.25 − 2.425)·0.5 = 1.4125 W.
+  test('5 V + 5 % to 2.5 V − 3 % at 0.5 A – 1.41 W', () => {
+    const board = oneRail({
+      part: { outputV: 2.5, outputTolerancePct: 3, groundA: [[0, 0]], dropoutV: [[0, 0.5]] },
+      supply: { minV: 4.75, nominalV: 5, maxV: 5.25 },
+      condition: { loadsA: { U1: 0.5 } },
+    });
+    expect(pointOf(board).dissipationW).toBeCloseTo(1.4125, 10);
+  });
+
   // SNOS412 table: quasi-LDO, dropout 1.20 / 1.25 / 1.30 V at 0.1 / 0.5 / 0.8 A, straight between: 1.225 V at 0.3 A.
   // Ground current 5 … 10 mA: 7 mA lies between by our own choice of the table.
   test('a quasi-LDO at 0.3 A – dropout and ground current between the points of its tables', () => {
