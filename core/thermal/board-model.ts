@@ -9,6 +9,7 @@ import { buildCopperMap } from './copper-map.ts';
 import { faces, type Face } from './film-areas.ts';
 import { filledShares, gridConductances } from './grid-conductances.ts';
 import { resolvedCells } from './land-correction.ts';
+import { widenFaces, type LandCorrection } from './land-correction.ts';
 import { landCorrections } from './land-corrections.ts';
 import { packageStar, type PackageNodes } from './package-star.ts';
 import { viaPairs } from './via-pairs.ts';
@@ -62,7 +63,7 @@ export function buildBoardModel(
   const resolvedMm = options.resolvedMm ?? resolvedCells * Math.max(grid.dxMm, grid.dyMm);
   const corrections = correctLands
     ? landCorrections(board, grid, layers, resolvedMm)
-    : new Map<string, Map<string, number>>();
+    : new Map<string, Map<string, LandCorrection>>();
   let next = cells * layers.count;
   for (const regulator of board.regulators) {
     const model = board.packages[board.parts[regulator.part]?.package ?? ''];
@@ -81,6 +82,12 @@ export function buildBoardModel(
     links: buildLinks(next, pairs),
     anchor: new Float64Array(next),
   };
+  for (const { ref, lands, side } of packages) {
+    lands.forEach(({ name, weights }) => {
+      const spread = corrections.get(ref)?.get(name)?.spread ?? 1;
+      if (spread !== 1) widenFaces(network, weights, side === 'top' ? 0 : layers.count - 1, spread);
+    });
+  }
   const sources = board.sources.map((source) => ({
     ref: source.ref,
     side: source.side,

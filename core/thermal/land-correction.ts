@@ -4,7 +4,7 @@ import { networkSolver } from '#core/numerics/kernel/network-solver.ts';
 import { buildLinks, type LayeredNetwork } from '#core/numerics/layered-network.ts';
 import type { BoardLayers } from './board-layers.ts';
 import type { CellGrid } from './cell-grid.ts';
-import { cellWeights } from './cell-weights.ts';
+import { cellWeights, type CellWeights } from './cell-weights.ts';
 import { buildCopperMap } from './copper-map.ts';
 import { filledShares, gridConductances } from './grid-conductances.ts';
 import type { PlacedLand } from './land-placement.ts';
@@ -21,10 +21,18 @@ const fineMm = 0.13;
 /** Film on both faces of a patch, W/(m²·K): it hardly matters over a few millimetres. */
 const patchFilm = 10;
 
+/** What the cells around a land need: resistance in series with it, K/W, and a factor on the faces around it. */
+export type LandCorrection = { kPerW: number; spread: number };
+
+/** A correction may take this share of the package's own resistance away, not more. */
+export const mostTaken = 0.9;
+
 /**
  * What the cells of a grid misjudge of the spreading right under and around a land, K/W, to be added in series with it: the land's
  * own resistance to a cool rim a few millimetres away, on the board's true geometry in fine cells less that in the grid's cells.
  * The idea is the well index of reservoir simulation (Peaceman, SPE J. 18 (1978) 183). It vanishes as the cells shrink.
+ * Where the cells hinder more than the package's own resistance can make up for (a land that fills one cell to its edges), the
+ * faces around the land's cells are widened instead, until the grid's cells give the true resistance.
  * @param resolvedMm pads at least this wide go without
  */
 export function landCorrection(
@@ -33,13 +41,13 @@ export function landCorrection(
   layers: BoardLayers,
   land: PlacedLand,
   resolvedMm: number,
-): number {
+): LandCorrection {
   const smallest = Math.min(...land.land.pads.flatMap((pad) => pad.sizeMm));
   const cellMm = Math.max(grid.dxMm, grid.dyMm);
   const factor = Math.min(8, Math.ceil(cellMm / fineMm));
-  if (smallest >= resolvedMm || factor < 2) return 0;
+  if (smallest >= resolvedMm || factor < 2) return none;
   const coarse = patchGrid(grid, land.pads.flat());
-  if (coarse === null) return 0;
+  if (coarse === null) return none;
   const fine: CellGrid = {
     ...coarse,
     dxMm: coarse.dxMm / factor,
@@ -54,8 +62,45 @@ export function landCorrection(
     right: coarse.x0Mm + coarse.columns * grid.dxMm < grid.x0Mm + grid.columns * grid.dxMm - 1e-9,
     high: coarse.y0Mm + coarse.rows * grid.dyMm < grid.y0Mm + grid.rows * grid.dyMm - 1e-9,
   };
-  const difference = ownResistance(board, fine, layers, land, rim) - ownResistance(board, coarse, layers, land, rim);
-  return Number.isFinite(difference) ? difference : 0;
+  const wanted = ownResistance(board, fine, layers, land, rim);
+  const on = (spread: number) => ownResistance(board, coarse, layers, land, rim, spread);
+  const difference = wanted - on(1);
+  if (!Number.isFinite(difference)) return none;
+  if (difference >= -mostTaken * land.land.kPerW) return { kPerW: difference, spread: 1 };
+  const spread = findSpread(on, wanted);
+  return { kPerW: Math.max(-mostTaken * land.land.kPerW, wanted - on(spread)), spread };
+}
+
+const none: LandCorrection = { kPerW: 0, spread: 1 };
+const mostSpread = 64;
+
+/** Factor at which a resistance that falls with it meets the wanted one, by halving on a logarithmic scale; at most 64. */
+function findSpread(resistance: (spread: number) => number, wanted: number): number {
+  let [low, high] = [1, mostSpread];
+  for (let step = 0; step < 12; step++) {
+    const middle = Math.sqrt(low * high);
+    if (resistance(middle) > wanted) low = middle;
+    else high = middle;
+  }
+  return Math.sqrt(low * high);
+}
+
+/** Multiplies the in-plane conductances between a land's cells and the cells beside them, on the land's layer. */
+export function widenFaces(
+  { columns, rows, layers, gx, gy }: LayeredNetwork,
+  land: CellWeights,
+  layer: number,
+  spread: number,
+) {
+  const own = new Set(land.cell);
+  const widen = (faces: Float64Array, cell: number) => (faces[cell * layers + layer]! *= spread);
+  for (const cell of own) {
+    const i = cell % columns;
+    if (i + 1 < columns && !own.has(cell + 1)) widen(gx, cell);
+    if (i > 0 && !own.has(cell - 1)) widen(gx, cell - 1);
+    if (cell + columns < columns * rows && !own.has(cell + columns)) widen(gy, cell);
+    if (cell >= columns && !own.has(cell - columns)) widen(gy, cell - columns);
+  }
 }
 
 /** The resistance is an energy of the field, so that its error is the square of this. */
@@ -85,7 +130,14 @@ function patchGrid(grid: CellGrid, points: [number, number][]): CellGrid | null 
 }
 
 /** Rise of the land per watt put into it, with the rim of the patch held cool, K/W. */
-function ownResistance(board: Board, grid: CellGrid, layers: BoardLayers, land: PlacedLand, rim: Rim): number {
+function ownResistance(
+  board: Board,
+  grid: CellGrid,
+  layers: BoardLayers,
+  land: PlacedLand,
+  rim: Rim,
+  spread = 1,
+): number {
   const map = buildCopperMap(board, grid);
   const weights = cellWeights(map, land.pads);
   if (weights.cell.length === 0) return NaN;
@@ -109,6 +161,7 @@ function ownResistance(board: Board, grid: CellGrid, layers: BoardLayers, land: 
     links: buildLinks(cells + slug, pairs),
     anchor: new Float64Array(cells + slug),
   };
+  if (spread !== 1) widenFaces(network, weights, offset, spread);
   anchorRim(network, rim);
   const face = patchFilm * grid.dxMm * grid.dyMm * 1e-6;
   for (let cell = 0; cell < columns * rows; cell++) {

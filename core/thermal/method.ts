@@ -6,7 +6,8 @@
  * 1.2.0 each land corrected, by a patch of fine cells, for what the board's cells misjudge around it.
  * 1.2.1 both grids of the grid error correct the same lands; turned lands meet the cells of unturned ones;
  *       films that radiation keeps from settling are damped.
- * 1.3.0 a compiled kernel solves the network: the same equations, other digits behind the tolerance; model error by heat path.
+ * 1.3.0 a compiled kernel solves the network: the same equations, other digits behind the tolerance; model error by heat path;
+ *       the faces around a land that fills its cells are widened where its package cannot make up for them.
  */
 export const methodVersion = '1.3.0';
 

@@ -5,6 +5,7 @@ import type { Regulator } from '#core/board/placement.ts';
 import { placedRectangle } from '#core/geometry/placed-rectangle.ts';
 import { cellWeights, type CellWeights } from './cell-weights.ts';
 import type { CopperMap } from './copper-map.ts';
+import type { LandCorrection } from './land-correction.ts';
 import { placedLands } from './land-placement.ts';
 import { solderWPerM2K } from './materials.ts';
 
@@ -14,7 +15,14 @@ export type PackageNodes = {
   path: HeatPath;
   junction: number;
   /** `kPerW` from the junction to what the land's cells show; `correctionKPerW` of it lies between the land and its cells. */
-  lands: { weights: CellWeights; slug: number | null; layer: number; kPerW: number; correctionKPerW: number }[];
+  lands: {
+    name: string;
+    weights: CellWeights;
+    slug: number | null;
+    layer: number;
+    kPerW: number;
+    correctionKPerW: number;
+  }[];
   side: 'top' | 'bottom';
   caseTopKPerW: number;
   /** Body surface that sees the air, m². */
@@ -31,7 +39,7 @@ type Pair = { a: number; b: number; g: number };
  * Star of a package (JESD15-3's two-resistor model is the case of one land and one top): junction to each land, to the
  * board under the body, and to the case top, whose film is added with the films. A tab is an isothermal slug on solder;
  * leads are spread over their pads.
- * @param corrections of its lands, K/W, by part and land name
+ * @param corrections of its lands by part and land name
  * @param next number of the next free extra node
  * @param nodeOf node of a cell on an outer face of a side
  */
@@ -40,7 +48,7 @@ export function packageStar(
   map: CopperMap,
   regulator: Regulator,
   model: PackageModel,
-  corrections: ReadonlyMap<string, ReadonlyMap<string, number>>,
+  corrections: ReadonlyMap<string, ReadonlyMap<string, LandCorrection>>,
   next: number,
   nodeOf: (cell: number, side: 'top' | 'bottom') => number,
 ): { nodes: PackageNodes; pairs: Pair[]; used: number } {
@@ -51,14 +59,14 @@ export function packageStar(
     const weights = cellWeights(map, pads);
     const slug = land.kind === 'tab' && weights.cell.length > 0 ? next + used++ : null;
     // A correction below zero may not eat up the package's own resistance.
-    const kPerW = Math.max(0.1 * land.kPerW, land.kPerW + (corrections.get(regulator.ref)?.get(land.name) ?? 0));
+    const kPerW = Math.max(0.1 * land.kPerW, land.kPerW + (corrections.get(regulator.ref)?.get(land.name)?.kPerW ?? 0));
     if (slug !== null) pairs.push({ a: junction, b: slug, g: 1 / kPerW });
     weights.cell.forEach((cell, k) => {
       const node = nodeOf(cell, regulator.side);
       if (slug === null) pairs.push({ a: junction, b: node, g: weights.weight[k]! / kPerW });
       else pairs.push({ a: slug, b: node, g: solderWPerM2K * weights.areaM2 * weights.weight[k]! });
     });
-    return { weights, slug, layer, kPerW, correctionKPerW: kPerW - land.kPerW };
+    return { name: land.name, weights, slug, layer, kPerW, correctionKPerW: kPerW - land.kPerW };
   });
   const [length, width, height] = model.bodyMm;
   if (model.underBodyKPerW !== null) {

@@ -39,7 +39,7 @@ export function junctionAccuracy(cellMm: number): { rmsK: number; junctions: num
   };
 }
 
-function junctionRises(board: ReturnType<typeof hardBoard>, cellMm: number): number[] {
+export function junctionRises(board: ReturnType<typeof hardBoard>, cellMm: number): number[] {
   const model = buildBoardModel(board, { cellMm });
   const heat = {
     regulatorsW: new Map(board.regulators.map(({ ref, powerW }) => [ref, powerW ?? 0])),
@@ -64,7 +64,7 @@ function middleOf(seed: number) {
   return { ...board, outline: { points, cutouts: [] }, regulators: board.regulators.filter(inside) };
 }
 
-function isolatedLand(dx: number, dy: number) {
+export function isolatedLand(dx: number, dy: number) {
   const board = hardBoard(1, 2);
   const points: [number, number][] = [
     [0, 0],
